@@ -1,0 +1,168 @@
+package org.steamwitness.finding;
+
+import java.util.Locale;
+
+/**
+ * The catalogue of findings: what each says, how much it weighs and what to do. Names in braces stand for facts, which
+ * a {@link Finding} of this kind has to bring.
+ */
+public enum FindingKind {
+    // the log can't be evaluated
+    /** Bytes that are no text. */
+    LOG_NOT_TEXT(
+            Severity.BLOCKS,
+            "The file is not text in UTF-8: {why}.",
+            "Export the log as delimited text in UTF-8 and evaluate that file."),
+    /** Nothing that could be a sample. */
+    LOG_EMPTY(
+            Severity.BLOCKS,
+            "The log holds no row that could be read as a sample.",
+            "Check that the logger's export has finished and that the right file was named."),
+    /** No column of times. */
+    LOG_WITHOUT_TIME(
+            Severity.BLOCKS,
+            "No usable time base: {why}.",
+            "The first column must hold ISO 8601 times such as 2026-03-14T08:05:00."),
+    /** A planned column is not there. */
+    COLUMN_ABSENT(
+            Severity.BLOCKS,
+            "The plan's channel {channel} needs a column with the header \"{column}\"; the log has: {headers}.",
+            "Name the header in the plan exactly as the log writes it."),
+    /** A planned column stands twice. */
+    COLUMN_TWICE(
+            Severity.BLOCKS,
+            "The header \"{column}\" of the plan's channel {channel} stands {times} times in the log.",
+            "Let the logger export each channel under a header of its own."),
+    /** Too much was refused. */
+    TOO_MANY_ROWS_REFUSED(
+            Severity.BLOCKS,
+            "{refused} of {rows} rows were refused, more than the {share} % allowed; the first: line {line}, {reason}.",
+            "Check that the log is whole and that the plan describes this log."),
+    /** A channel has no value at all. */
+    CHANNEL_EMPTY(
+            Severity.BLOCKS,
+            "The channel {channel} has no sample that could be read.",
+            "Check the column \"{column}\" of the log; if the channel is not in use, take it out of the plan."),
+
+    // plan and run sheet can't be used
+    /** A plan or run sheet does not keep its shape. */
+    ENTRY_WRONG(Severity.BLOCKS, "{what}", "Correct the file at this place."),
+    /** The run sheet was filled in for another plan. */
+    PLAN_DIFFERS(
+            Severity.BLOCKS,
+            "The run sheet was written for plan {sheet}, this is plan {plan}.",
+            "Evaluate with the plan that was used, or correct the run sheet with a reason."),
+    /** The run sheet was filled in for other equipment. */
+    EQUIPMENT_DIFFERS(
+            Severity.BLOCKS,
+            "The run sheet names equipment {sheet}, the plan is for {plan}.",
+            "Evaluate with the plan of the equipment that was used, or correct the run sheet."),
+
+    // the record tells
+    /** Rows that did not become samples. */
+    ROWS_REFUSED(
+            Severity.REVIEW,
+            "{rows} rows between lines {from} and {to} were refused: {column}: {reason}.",
+            "Look at these lines of the log; missing samples are never filled in."),
+    /** Refused rows or missing samples while the hold was running. */
+    SAMPLES_MISSING_IN_HOLD(
+            Severity.BLOCKS,
+            "{samples} samples of {channel} are missing in the hold phase.",
+            "A person has to judge whether the hold phase is proven without them."),
+    /** Time between samples beyond the plan's longest gap. */
+    GAP(
+            Severity.REVIEW,
+            "No sample for {duration} from {at}, longer than the plan's longest gap of {allowed}.",
+            "Holding time and lethality over this gap count as nothing; find out why the logger stopped."),
+    /** A gap inside the hold phase or at its end. */
+    GAP_IN_HOLD(
+            Severity.BLOCKS,
+            "The hold is broken by a gap of {duration} from {at}.",
+            "What happened in the gap is not known; a person has to judge the run."),
+    /** The log stops while the hold is running. */
+    LOG_ENDS_IN_HOLD(
+            Severity.BLOCKS,
+            "The log ends in the hold phase.",
+            "The end of the hold is not in the log; look for the rest of the log."),
+    /** A mark of the run sheet lies outside the log. */
+    MARK_OUTSIDE_LOG(
+            Severity.REVIEW,
+            "The entered mark {mark} at {time} lies outside the log, which runs from {first} to {last}.",
+            "Check the entry and the clock of the logger."),
+    /** Marks that come in an impossible order. */
+    MARKS_OUT_OF_ORDER(
+            Severity.BLOCKS, "The entered mark {later} comes before {earlier}.", "Check the entries of the run sheet."),
+    /** A steam-contact probe left saturation beyond doubt. */
+    EPISODE_CONFIRMED(
+            Severity.REVIEW,
+            "{channel} left saturation from {from} to {to} ({kind}), at worst {worst} K against a tolerance of"
+                    + " {tolerance} K, beyond its uncertainty.",
+            "See the saturation part of the record; a person has to judge the run."),
+    /** A steam-contact probe may have left saturation. */
+    EPISODE_POSSIBLE(
+            Severity.REVIEW,
+            "{channel} may have left saturation from {from} to {to} ({kind}), at worst {worst} K against a tolerance of"
+                    + " {tolerance} K, within its uncertainty.",
+            "These sensors cannot tell; a person has to judge the run."),
+    /** Columns that nobody asked for. */
+    COLUMNS_UNREAD(
+            Severity.NOTE,
+            "Columns of the log that no channel of the plan names: {columns}.",
+            "Add them to the plan if they matter."),
+    /** Calibration is overdue on the day of the run. */
+    CALIBRATION_OVERDUE(
+            Severity.BLOCKS,
+            "The calibration of {channel} (certificate {certificate}) was due on {due}; the run is of {date}.",
+            "Have the sensor checked; a person has to judge the run by what that check finds."),
+    /** The plan has not been put in force. */
+    PLAN_IS_DRAFT(
+            Severity.NOTE,
+            "The plan is a draft: its criteria are shown, no verdict is given.",
+            "Put the plan in force once it has been approved."),
+    /** An entry that the plan requires is not there. */
+    ENTRY_MISSING(
+            Severity.BLOCKS,
+            "The plan requires the entry {entry}, which the run sheet does not hold.",
+            "Enter it with the time at which it is entered."),
+    /** A character that no font of the record has. */
+    GLYPH_MISSING(
+            Severity.NOTE,
+            "The printed record cannot show these characters: {characters}.",
+            "The attached files and the JSON hold them whole.");
+
+    private final Severity severity;
+    private final String text;
+    private final String remedy;
+
+    FindingKind(Severity severity, String text, String remedy) {
+        this.severity = severity;
+        this.text = text;
+        this.remedy = remedy;
+    }
+
+    /**
+     * How much a finding of this kind weighs.
+     *
+     * @return note, review or blocks
+     */
+    public Severity severity() {
+        return severity;
+    }
+
+    /**
+     * The word used in records, such as "rows-refused".
+     *
+     * @return lower case with hyphens
+     */
+    public String word() {
+        return name().toLowerCase(Locale.ROOT).replace('_', '-');
+    }
+
+    String text() {
+        return text;
+    }
+
+    String remedy() {
+        return remedy;
+    }
+}

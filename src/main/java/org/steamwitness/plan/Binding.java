@@ -1,0 +1,144 @@
+package org.steamwitness.plan;
+
+import java.time.LocalDate;
+import java.time.LocalTime;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.steamwitness.finding.Finding;
+import org.steamwitness.finding.FindingKind;
+import org.steamwitness.finding.Position;
+import org.steamwitness.quantity.Datum;
+import org.steamwitness.trace.Channel;
+import org.steamwitness.trace.Trace;
+
+/** One act of binding: resolves names, datums and marks, and collects what does not fit. */
+final class Binding {
+
+    private final Plan plan;
+    private final RunSheet sheet;
+    private final Trace trace;
+    private final List<Finding> findings = new ArrayList<>();
+
+    Binding(Plan plan, RunSheet sheet, Trace trace) {
+        this.plan = plan;
+        this.sheet = sheet;
+        this.trace = trace;
+    }
+
+    BoundPlan.Bound bound() {
+        checkPapers();
+        List<BoundChannel> channels = channels();
+        List<BoundChannel> start = plan.hold().startChannels().stream()
+                .map(name -> channels.stream()
+                        .filter(c -> c.name().equals(name))
+                        .findFirst()
+                        .orElseThrow())
+                .toList();
+        BoundPlan boundPlan = new BoundPlan(
+                channels,
+                plan.hold(),
+                start,
+                plan.medium().saturated() ? plan.saturation() : Optional.empty(),
+                plan.lethality(),
+                plan.decision(),
+                plan.longestGapSeconds(),
+                marks(),
+                plan.status() == PlanStatus.DRAFT,
+                plan.basis());
+        return new BoundPlan.Bound(boundPlan, List.copyOf(findings));
+    }
+
+    private void checkPapers() {
+        String thisPlan = plan.id() + " revision " + plan.revision();
+        String sheetPlan = sheet.planId() + " revision " + sheet.planRevision();
+        if (!thisPlan.equals(sheetPlan)) {
+            find(FindingKind.PLAN_DIFFERS, Map.of("sheet", sheetPlan, "plan", thisPlan));
+        }
+        if (!sheet.equipment().equals(plan.equipment())) {
+            find(FindingKind.EQUIPMENT_DIFFERS, Map.of("sheet", sheet.equipment(), "plan", plan.equipment()));
+        }
+        if (plan.status() == PlanStatus.DRAFT) {
+            find(FindingKind.PLAN_IS_DRAFT, Map.of());
+        }
+        for (String entry : plan.requiredEntries()) {
+            if (!sheet.holds(entry)) {
+                find(FindingKind.ENTRY_MISSING, Map.of("entry", entry));
+            }
+        }
+        LocalDate day = trace.clock().first().toLocalDate();
+        for (PlannedChannel channel : plan.channels()) {
+            if (channel.due().filter(day::isAfter).isPresent()) {
+                find(
+                        FindingKind.CALIBRATION_OVERDUE,
+                        Map.of(
+                                "channel", channel.name(),
+                                "certificate", channel.certificate().orElse("not named"),
+                                "due", channel.due().orElseThrow().toString(),
+                                "date", day.toString()));
+            }
+        }
+    }
+
+    private List<BoundChannel> channels() {
+        List<BoundChannel> bound = new ArrayList<>();
+        for (int i = 0; i < plan.channels().size(); i++) {
+            PlannedChannel planned = plan.channels().get(i);
+            Channel read = trace.channels().get(i);
+            if (planned.rule().datum() == Datum.GAUGE
+                    && sheet.atmospherePascal().isEmpty()) {
+                continue;
+            }
+            bound.add(new BoundChannel(
+                    planned.name(),
+                    planned.rule().kind(),
+                    planned.place(),
+                    planned.contact(),
+                    read.absolute(sheet.atmospherePascal().orElse(Double.NaN)),
+                    planned.uncertainty()
+                            .map(PlannedChannel.StatedUncertainty::standard)
+                            .map(OptionalDouble::of)
+                            .orElse(OptionalDouble.empty())));
+        }
+        return List.copyOf(bound);
+    }
+
+    private Marks marks() {
+        OptionalDouble steamOn = mark("steam-on", sheet.steamOn());
+        OptionalDouble ventClosed = mark("vent-closed", sheet.ventClosed());
+        OptionalDouble steamOff = mark("steam-off", sheet.steamOff());
+        checkOrder("steam-on", steamOn, "vent-closed", ventClosed);
+        checkOrder("vent-closed", ventClosed, "steam-off", steamOff);
+        checkOrder("steam-on", steamOn, "steam-off", steamOff);
+        return new Marks(steamOn, ventClosed, steamOff);
+    }
+
+    private OptionalDouble mark(String name, Optional<LocalTime> entered) {
+        if (entered.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        OptionalDouble seconds = trace.clock().secondsAt(entered.get(), trace.lastSeconds());
+        if (seconds.isEmpty()) {
+            find(
+                    FindingKind.MARK_OUTSIDE_LOG,
+                    Map.of(
+                            "mark", name,
+                            "time", entered.get().toString(),
+                            "first", trace.clock().timeOfDayAt(0),
+                            "last", trace.clock().timeOfDayAt(trace.lastSeconds())));
+        }
+        return seconds;
+    }
+
+    private void checkOrder(String earlierName, OptionalDouble earlier, String laterName, OptionalDouble later) {
+        if (earlier.isPresent() && later.isPresent() && later.getAsDouble() < earlier.getAsDouble()) {
+            find(FindingKind.MARKS_OUT_OF_ORDER, Map.of("earlier", earlierName, "later", laterName));
+        }
+    }
+
+    private void find(FindingKind kind, Map<String, String> facts) {
+        findings.add(new Finding(kind, Position.RUN, facts));
+    }
+}

@@ -1,0 +1,53 @@
+package org.steamwitness.plan;
+
+import java.time.LocalDate;
+import java.util.Optional;
+import org.steamwitness.trace.Place;
+import org.steamwitness.trace.ReadingRules.ColumnRule;
+
+/**
+ * A channel as the plan describes it.
+ *
+ * @param rule name, column, quantity, unit and datum
+ * @param place where its sensor sits
+ * @param contact what touches the sensor
+ * @param uncertainty what the plan states of its uncertainty
+ * @param certificate the calibration certificate
+ * @param due when the next calibration is due
+ */
+public record PlannedChannel(
+        ColumnRule rule,
+        Place place,
+        Contact contact,
+        Optional<StatedUncertainty> uncertainty,
+        Optional<String> certificate,
+        Optional<LocalDate> due) {
+
+    /**
+     * The channel's name in plan and record.
+     *
+     * @return such as "can-1"
+     */
+    public String name() {
+        return rule.channel();
+    }
+
+    /**
+     * What a plan states of the part of a channel's uncertainty that all its samples share.
+     *
+     * @param calibration expanded uncertainty of the calibration, in kelvin or pascal
+     * @param drift expanded allowance for drift since, in kelvin or pascal
+     * @param coverage the factor by which both were expanded
+     */
+    public record StatedUncertainty(double calibration, double drift, double coverage) {
+
+        /**
+         * The standard uncertainty that all samples share.
+         *
+         * @return in kelvin or pascal
+         */
+        public double standard() {
+            return Math.sqrt(calibration * calibration + drift * drift) / coverage;
+        }
+    }
+}

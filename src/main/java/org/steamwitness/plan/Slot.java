@@ -1,0 +1,122 @@
+package org.steamwitness.plan;
+
+import java.time.DateTimeException;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import org.snakeyaml.engine.v2.nodes.MappingNode;
+import org.snakeyaml.engine.v2.nodes.Node;
+import org.snakeyaml.engine.v2.nodes.ScalarNode;
+import org.snakeyaml.engine.v2.nodes.SequenceNode;
+import org.snakeyaml.engine.v2.nodes.Tag;
+
+/** The value under one key, not yet understood. Each way to understand it reports what it has to refuse. */
+final class Slot {
+
+    private final Document document;
+    private final Section owner;
+    private final String path;
+    private final Node node;
+
+    Slot(Document document, Section owner, String path, Node node) {
+        this.document = document;
+        this.owner = owner;
+        this.path = path;
+        this.node = node;
+    }
+
+    boolean isEmpty() {
+        return node == null;
+    }
+
+    boolean isSection() {
+        return node instanceof MappingNode;
+    }
+
+    /** Text as written, whatever type YAML would make of it. */
+    Entry<String> text() {
+        return parsed("text", Function.identity());
+    }
+
+    /** Text that a parser turns into a value; its message says what it expected. */
+    <T> Entry<T> parsed(String expected, Function<String, T> parser) {
+        if (isEmpty()) {
+            return Entry.absent();
+        }
+        if (!(node instanceof ScalarNode scalar)) {
+            return refused("expected " + expected);
+        }
+        if (scalar.getTag().equals(Tag.NULL) || scalar.getValue().isBlank()) {
+            return refused("is empty; expected " + expected);
+        }
+        try {
+            return Entry.of(parser.apply(scalar.getValue()));
+        } catch (DateTimeException notATime) {
+            return refused("\"" + scalar.getValue() + "\" is not " + expected);
+        } catch (NumberFormatException notANumber) {
+            return refused("\"" + scalar.getValue() + "\" is not " + expected);
+        } catch (IllegalArgumentException wrong) {
+            return refused(wrong.getMessage());
+        }
+    }
+
+    Entry<Integer> whole(int low, int high) {
+        return parsed("a whole number from " + low + " to " + high, text -> {
+            int value = Integer.parseInt(text);
+            if (value < low || value > high) {
+                throw new NumberFormatException(text);
+            }
+            return value;
+        });
+    }
+
+    /** One of the words of an enum. */
+    <E extends Enum<E>> Entry<E> word(Class<E> type, Function<E, String> word) {
+        String known = Arrays.stream(type.getEnumConstants()).map(word).collect(Collectors.joining(", "));
+        return parsed(
+                "one of: " + known,
+                text -> Arrays.stream(type.getEnumConstants())
+                        .filter(constant -> word.apply(constant).equals(text))
+                        .findFirst()
+                        .orElseThrow(() -> new IllegalArgumentException("\"" + text + "\" is not one of: " + known)));
+    }
+
+    <T> Entry<T> section(Function<Section, T> reader) {
+        if (isEmpty()) {
+            return Entry.absent();
+        }
+        if (!(node instanceof MappingNode mapping)) {
+            return refused("expected keys and values, one level deeper");
+        }
+        return new Section(document, mapping, path).read(reader);
+    }
+
+    /** A list; each item is understood by itself, so that all mistakes are reported. */
+    <T> Entry<List<T>> list(Function<Slot, Entry<T>> item) {
+        if (isEmpty()) {
+            return Entry.absent();
+        }
+        if (!(node instanceof SequenceNode sequence)) {
+            return refused("expected a list");
+        }
+        if (sequence.getValue().isEmpty()) {
+            return refused("the list is empty; expected one entry or more");
+        }
+        List<Entry<T>> items = new ArrayList<>();
+        for (Node each : sequence.getValue()) {
+            items.add(item.apply(new Slot(document, owner, path + "[" + items.size() + "]", each)));
+        }
+        try {
+            return Entry.of(items.stream().map(Entry::get).toList());
+        } catch (Entry.IncompleteException reported) {
+            return Entry.broken();
+        }
+    }
+
+    <T> Entry<T> refused(String what) {
+        owner.refuseAt(node, path, what);
+        return Entry.broken();
+    }
+}
