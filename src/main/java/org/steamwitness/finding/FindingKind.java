@@ -64,7 +64,12 @@ public enum FindingKind {
             Severity.REVIEW,
             "{rows} rows between lines {from} and {to} were refused: {column}: {reason}.",
             "Look at these lines of the log; missing samples are never filled in."),
-    /** Refused rows or missing samples while the hold was running. */
+    /** Rows or fields refused while the hold was running. */
+    ROWS_REFUSED_IN_HOLD(
+            Severity.BLOCKS,
+            "Rows or fields between lines {from} and {to}, in the hold phase, were refused.",
+            "A person has to look at these lines and judge whether the hold phase is proven without them."),
+    /** Missing samples while the hold was running. */
     SAMPLES_MISSING_IN_HOLD(
             Severity.BLOCKS,
             "{samples} samples of {channel} are missing in the hold phase.",

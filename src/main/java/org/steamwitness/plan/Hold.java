@@ -38,4 +38,14 @@ public record Hold(
         }
         startChannels = List.copyOf(startChannels);
     }
+
+    /**
+     * Tells whether a temperature lies in the band.
+     *
+     * @param kelvin a temperature, not NaN
+     * @return true on both limits too
+     */
+    public boolean contains(double kelvin) {
+        return kelvin >= atLeastKelvin && kelvin <= atMostKelvin;
+    }
 }

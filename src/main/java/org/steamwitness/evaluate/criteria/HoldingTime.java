@@ -1,0 +1,46 @@
+package org.steamwitness.evaluate.criteria;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.stream.Collectors;
+import org.steamwitness.evaluate.hold.HoldResult;
+import org.steamwitness.plan.BoundChannel;
+import org.steamwitness.plan.BoundPlan;
+import org.steamwitness.quantity.Printed;
+
+/** The band was held long enough. Guarded decisions use what the samples leave possible, simple ones what they prove. */
+final class HoldingTime {
+
+    private HoldingTime() {}
+
+    static Criterion of(BoundPlan plan, HoldResult hold) {
+        double limit = plan.hold().durationSeconds();
+        double possible = plan.decision().guarded() ? hold.possibleSeconds() : hold.provenSeconds();
+        Decision decision = GuardBand.atLeast(hold.provenSeconds(), possible, limit);
+        return new Criterion(
+                "holding-time",
+                Criterion.Subject.TIME_OR_TEMPERATURE,
+                "holding time",
+                plan.startChannels().stream().map(BoundChannel::name).collect(Collectors.joining(", ")),
+                "hold",
+                "s",
+                OptionalDouble.of(hold.provenSeconds()),
+                limit,
+                true,
+                OptionalDouble.empty(),
+                Optional.empty(),
+                decision,
+                why(decision, hold));
+    }
+
+    private static String why(Decision decision, HoldResult hold) {
+        if (hold.possibleSeconds() == 0) {
+            return "the band was never held";
+        }
+        String proven = "proven " + Printed.duration(hold.provenSeconds());
+        return decision == Decision.UNDECIDED
+                ? proven + ", possible " + Printed.duration(hold.possibleSeconds())
+                        + ": the sampling interval leaves it open"
+                : proven;
+    }
+}

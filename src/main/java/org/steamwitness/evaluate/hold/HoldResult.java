@@ -1,0 +1,107 @@
+package org.steamwitness.evaluate.hold;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.steamwitness.evaluate.phase.HoldAttempt;
+import org.steamwitness.evaluate.phase.Phase;
+import org.steamwitness.evaluate.phase.Phases;
+import org.steamwitness.plan.BoundChannel;
+import org.steamwitness.plan.BoundPlan;
+import org.steamwitness.trace.QuantityKind;
+import org.steamwitness.trace.Trace;
+
+/**
+ * The hold as the samples prove it.
+ *
+ * @param provenSeconds from the first to the last sample inside the band; zero if it was never held
+ * @param possibleSeconds from the sample before to the sample after; the truth lies between both
+ * @param probes what each temperature channel showed, in the order of the plan
+ * @param spread greatest difference between steam-contact probes at one instant; empty with fewer than two of them
+ * @param missingSamples samples of the starting channels that are missing in the hold phase
+ */
+public record HoldResult(
+        double provenSeconds,
+        double possibleSeconds,
+        List<ProbeInHold> probes,
+        Optional<Spread> spread,
+        List<MissingSamples> missingSamples) {
+
+    /**
+     * Measures the hold.
+     *
+     * @param trace the samples
+     * @param plan the bound plan
+     * @param phases the phases
+     * @return its times and temperatures
+     */
+    public static HoldResult of(Trace trace, BoundPlan plan, Phases phases) {
+        Optional<HoldAttempt> judged = phases.judged();
+        if (judged.isEmpty()) {
+            return new HoldResult(0, 0, List.of(), Optional.empty(), List.of());
+        }
+        HoldAttempt attempt = judged.get();
+        Phase hold = phases.hold().orElseThrow();
+        List<ProbeInHold> probes = plan.channels().stream()
+                .filter(c -> c.kind() == QuantityKind.TEMPERATURE)
+                .flatMap(c -> ProbeInHold.of(trace, c, hold, plan.longestGapSeconds()).stream())
+                .toList();
+        return new HoldResult(
+                trace.seconds().at(attempt.to()) - trace.seconds().at(attempt.from()),
+                attempt.latestEndSeconds() - attempt.earliestStartSeconds(),
+                probes,
+                Spread.of(plan.inSteam(), hold),
+                missing(plan, hold));
+    }
+
+    private static List<MissingSamples> missing(BoundPlan plan, Phase hold) {
+        List<MissingSamples> missing = new ArrayList<>();
+        for (BoundChannel channel : plan.startChannels()) {
+            int count = 0;
+            for (int i = hold.from(); i < hold.end(); i++) {
+                count += channel.values().missing(i) ? 1 : 0;
+            }
+            if (count > 0) {
+                missing.add(new MissingSamples(channel, count));
+            }
+        }
+        return List.copyOf(missing);
+    }
+
+    /**
+     * Missing samples of one channel.
+     *
+     * @param channel a starting channel
+     * @param samples how many, one or more
+     */
+    public record MissingSamples(BoundChannel channel, int samples) {}
+
+    /**
+     * Difference between the hottest and the coldest steam-contact probe at one instant.
+     *
+     * @param kelvin the greatest one of the hold phase
+     * @param index of its sample
+     */
+    public record Spread(double kelvin, int index) {
+
+        static Optional<Spread> of(List<BoundChannel> probes, Phase hold) {
+            Spread greatest = null;
+            for (int i = hold.from(); i < hold.end(); i++) {
+                double lowest = Double.POSITIVE_INFINITY;
+                double highest = Double.NEGATIVE_INFINITY;
+                int present = 0;
+                for (BoundChannel probe : probes) {
+                    if (!probe.values().missing(i)) {
+                        lowest = Math.min(lowest, probe.values().at(i));
+                        highest = Math.max(highest, probe.values().at(i));
+                        present++;
+                    }
+                }
+                if (present > 1 && (greatest == null || highest - lowest > greatest.kelvin)) {
+                    greatest = new Spread(highest - lowest, i);
+                }
+            }
+            return Optional.ofNullable(greatest);
+        }
+    }
+}

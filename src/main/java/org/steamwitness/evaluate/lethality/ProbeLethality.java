@@ -1,0 +1,109 @@
+package org.steamwitness.evaluate.lethality;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.steamwitness.evaluate.phase.Phase;
+import org.steamwitness.evaluate.phase.PhaseName;
+import org.steamwitness.plan.BoundChannel;
+import org.steamwitness.plan.LethalityAim;
+import org.steamwitness.trace.SegmentWalk;
+import org.steamwitness.trace.Trace;
+
+/**
+ * Lethality at one probe.
+ *
+ * @param channel the probe
+ * @param perPhase one value a phase, in the order of the run; their sum is the total
+ * @param toSteamOffSeconds up to the end of the hold phase
+ * @param withCoolingSeconds over the whole run
+ * @param lowSeconds what counts towards the aim, if the sensor read high by its expanded uncertainty (k = 2)
+ * @param highSeconds the same, if it read low
+ * @param surelySeconds what counts towards the aim, if it read high by z standard uncertainties
+ * @param surelyNotSeconds the same, if it read low
+ * @param coverage bridged and lost time
+ */
+public record ProbeLethality(
+        BoundChannel channel,
+        List<PhaseValue> perPhase,
+        double toSteamOffSeconds,
+        double withCoolingSeconds,
+        double lowSeconds,
+        double highSeconds,
+        double surelySeconds,
+        double surelyNotSeconds,
+        SegmentWalk.Coverage coverage) {
+
+    /**
+     * What counts towards the aim.
+     *
+     * @param aim the plan's
+     * @return seconds at the reference temperature
+     */
+    public double countedSeconds(LethalityAim aim) {
+        return aim.coolingCounted() ? withCoolingSeconds : toSteamOffSeconds;
+    }
+
+    static ProbeLethality of(Trace trace, BoundChannel probe, LethalityAim aim, Scope scope) {
+        SegmentWalk walk = new SegmentWalk(trace.seconds(), probe.values(), scope.longestGapSeconds());
+        List<PhaseValue> perPhase = new ArrayList<>();
+        SegmentWalk.Coverage coverage = new SegmentWalk.Coverage(0, 0, 0);
+        double toSteamOff = 0;
+        double all = 0;
+        for (Phase phase : scope.phases()) {
+            LethalityIntegral integral = new LethalityIntegral(aim, 0);
+            coverage = coverage.plus(walk.over(phase.from(), phase.to(), integral));
+            perPhase.add(new PhaseValue(phase, integral.seconds()));
+            all += integral.seconds();
+            toSteamOff += afterHold(scope, phase) ? 0 : integral.seconds();
+        }
+        double common = probe.commonUncertainty().orElse(0);
+        int end = aim.coolingCounted() ? trace.size() - 1 : scope.steamOffIndex();
+        return new ProbeLethality(
+                probe,
+                List.copyOf(perPhase),
+                toSteamOff,
+                all,
+                shifted(walk, aim, end, -2 * common),
+                shifted(walk, aim, end, 2 * common),
+                shifted(walk, aim, end, -scope.z() * common),
+                shifted(walk, aim, end, scope.z() * common),
+                coverage);
+    }
+
+    private static boolean afterHold(Scope scope, Phase phase) {
+        return phase.from() >= scope.steamOffIndex();
+    }
+
+    private static double shifted(SegmentWalk walk, LethalityAim aim, int end, double offsetKelvin) {
+        LethalityIntegral integral = new LethalityIntegral(aim, offsetKelvin);
+        walk.over(0, end, integral);
+        return integral.seconds();
+    }
+
+    /**
+     * Lethality in one phase.
+     *
+     * @param phase the phase
+     * @param seconds at the reference temperature
+     */
+    public record PhaseValue(Phase phase, double seconds) {}
+
+    /**
+     * What all probes share.
+     *
+     * @param phases the run's phases
+     * @param longestGapSeconds longest time between two samples that a line may bridge
+     * @param z standard uncertainties that make a value sure, one-sided
+     */
+    record Scope(List<Phase> phases, double longestGapSeconds, double z) {
+
+        /** Index of the first sample behind the hold phase, or of the last sample of the run. */
+        int steamOffIndex() {
+            return phases.stream()
+                    .filter(p -> p.name() == PhaseName.HOLD)
+                    .findFirst()
+                    .orElse(phases.get(phases.size() - 1))
+                    .to();
+        }
+    }
+}

@@ -1,0 +1,2 @@
+/** Lethality integrated along the measured temperatures. */
+package org.steamwitness.evaluate.lethality;

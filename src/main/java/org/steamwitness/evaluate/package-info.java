@@ -1,0 +1,2 @@
+/** Pure functions from a trace and a bound plan to results; one sub-package a question. */
+package org.steamwitness.evaluate;

@@ -1,0 +1,92 @@
+package org.steamwitness.evaluate.saturation;
+
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.Optional;
+import org.steamwitness.evaluate.phase.Phase;
+import org.steamwitness.plan.BoundChannel;
+
+/**
+ * What one probe showed in one phase.
+ *
+ * @param channel the probe
+ * @param phase the phase
+ * @param states how many samples were in each state that occurred
+ * @param figures its departures; empty if no sample could be judged
+ */
+public record PhaseDeparture(
+        BoundChannel channel, Phase phase, Map<SampleState, Integer> states, Optional<Figures> figures) {
+
+    static PhaseDeparture of(Departure departure, Phase phase, SampleStates states, double toleranceKelvin, double z) {
+        Map<SampleState, Integer> counts = new EnumMap<>(SampleState.class);
+        int judged = 0;
+        int lowest = -1;
+        int highest = -1;
+        double sum = 0;
+        double squares = 0;
+        double air = 0;
+        double airHighest = Double.NEGATIVE_INFINITY;
+        double smallestAir = 0;
+        for (int i = phase.from(); i < phase.end(); i++) {
+            counts.merge(states.at(i), 1, Integer::sum);
+            double kelvin = departure.kelvinAt(i);
+            if (Double.isNaN(kelvin)) {
+                continue;
+            }
+            judged++;
+            sum += kelvin;
+            squares += kelvin * kelvin;
+            lowest = lowest < 0 || kelvin < departure.kelvinAt(lowest) ? i : lowest;
+            highest = highest < 0 || kelvin > departure.kelvinAt(highest) ? i : highest;
+            double fraction = departure.airFractionAt(i);
+            air += fraction;
+            airHighest = Math.max(airHighest, fraction);
+            smallestAir = Math.max(
+                    smallestAir, departure.airFractionFor(toleranceKelvin + z * departure.uncertaintyAt(i), i));
+        }
+        Optional<Figures> figures = judged == 0
+                ? Optional.empty()
+                : Optional.of(new Figures(
+                        extreme(departure, lowest),
+                        extreme(departure, highest),
+                        sum / judged,
+                        Math.sqrt(squares / judged),
+                        air / judged,
+                        airHighest,
+                        smallestAir));
+        return new PhaseDeparture(departure.channel(), phase, counts, figures);
+    }
+
+    private static Extreme extreme(Departure departure, int index) {
+        return new Extreme(departure.kelvinAt(index), departure.uncertaintyAt(index), index);
+    }
+
+    /**
+     * A least or greatest departure.
+     *
+     * @param kelvin the departure
+     * @param uncertaintyKelvin its standard uncertainty
+     * @param index its sample
+     */
+    public record Extreme(double kelvin, double uncertaintyKelvin, int index) {}
+
+    /**
+     * Departures over the samples that could be judged.
+     *
+     * @param lowest least departure, the first if there are several
+     * @param highest greatest departure
+     * @param meanKelvin mean departure
+     * @param rmsKelvin root of the mean square departure
+     * @param airFractionMean mean equivalent air fraction
+     * @param airFractionHighest highest equivalent air fraction
+     * @param smallestAirFraction the least air fraction that this probe would have confirmed at every sample
+     */
+    public record Figures(
+            Extreme lowest,
+            Extreme highest,
+            double meanKelvin,
+            double rmsKelvin,
+            double airFractionMean,
+            double airFractionHighest,
+            double smallestAirFraction) {}
+}

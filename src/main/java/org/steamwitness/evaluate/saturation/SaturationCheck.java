@@ -1,0 +1,144 @@
+package org.steamwitness.evaluate.saturation;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.steamwitness.evaluate.instruments.Instruments;
+import org.steamwitness.evaluate.phase.Phase;
+import org.steamwitness.evaluate.phase.Phases;
+import org.steamwitness.plan.BoundChannel;
+import org.steamwitness.plan.BoundPlan;
+import org.steamwitness.plan.SaturationTolerance;
+import org.steamwitness.trace.Column;
+import org.steamwitness.trace.Trace;
+
+/**
+ * All steam-contact probes held against saturation. Figures are given for every phase, episodes are sought in the hold
+ * phase, which alone is judged.
+ *
+ * @param notJudged why saturation could not be judged; empty if it was
+ * @param tolerance the plan's tolerances
+ * @param saturationKelvin saturation temperature of the measured pressure, one value a sample; NaN where unknown
+ * @param perPhase what each probe showed in each phase
+ * @param episodes in the hold phase, in the order of probes
+ */
+public record SaturationCheck(
+        Optional<String> notJudged,
+        Optional<SaturationTolerance> tolerance,
+        Column saturationKelvin,
+        List<PhaseDeparture> perPhase,
+        List<Episode> episodes) {
+
+    /**
+     * Holds the samples against saturation.
+     *
+     * @param trace the samples
+     * @param plan the bound plan
+     * @param instruments what is known of the channels
+     * @param phases the phases
+     * @param z standard uncertainties that make a departure sure, one-sided
+     * @return figures and episodes
+     */
+    public static SaturationCheck of(Trace trace, BoundPlan plan, Instruments instruments, Phases phases, double z) {
+        Optional<BoundChannel> pressure = plan.pressure();
+        Column saturation = pressure.map(p -> saturationOf(p.values())).orElseGet(() -> unknown(trace.size()));
+        Optional<String> obstacle = obstacle(plan, phases);
+        if (obstacle.isPresent()) {
+            return new SaturationCheck(obstacle, plan.saturation(), saturation, List.of(), List.of());
+        }
+        SaturationTolerance tolerance = plan.saturation().orElseThrow();
+        List<PhaseDeparture> perPhase = new ArrayList<>();
+        List<Episode> episodes = new ArrayList<>();
+        for (BoundChannel probe : plan.inSteam()) {
+            Departure departure = new Departure(instruments.of(probe), instruments.of(pressure.orElseThrow()));
+            SampleStates states = new SampleStates(departure, tolerance, z);
+            for (Phase phase : phases.phases()) {
+                perPhase.add(PhaseDeparture.of(departure, phase, states, tolerance.airKelvin(), z));
+            }
+            EpisodeFinder finder = new EpisodeFinder(trace, departure, tolerance, states);
+            phases.hold().ifPresent(hold -> episodes.addAll(finder.between(hold.from(), hold.end())));
+        }
+        return new SaturationCheck(
+                Optional.empty(), plan.saturation(), saturation, List.copyOf(perPhase), List.copyOf(episodes));
+    }
+
+    /**
+     * What the probes showed in one phase.
+     *
+     * @param phase one of the run's phases
+     * @return one entry a steam-contact probe that could be judged
+     */
+    public List<PhaseDeparture> in(Phase phase) {
+        return perPhase.stream()
+                .filter(p -> p.phase().equals(phase) && p.figures().isPresent())
+                .toList();
+    }
+
+    /**
+     * The least air fraction that any of the probes would have confirmed at every instant of a phase.
+     *
+     * @param phase one of the run's phases
+     * @return mole fraction; empty if no sample could be judged
+     */
+    public OptionalDouble smallestAirFraction(Phase phase) {
+        return in(phase).stream()
+                .mapToDouble(p -> p.figures().orElseThrow().smallestAirFraction())
+                .max();
+    }
+
+    /**
+     * Departure of a probe from saturation, one value a sample.
+     *
+     * @param probe a steam-contact channel
+     * @return kelvin; NaN where it is not known
+     */
+    public Column departureKelvin(BoundChannel probe) {
+        Column saturation = saturationKelvin;
+        return new Column() {
+            @Override
+            public int size() {
+                return saturation.size();
+            }
+
+            @Override
+            public double at(int index) {
+                return probe.values().at(index) - saturation.at(index);
+            }
+        };
+    }
+
+    private static Optional<String> obstacle(BoundPlan plan, Phases phases) {
+        if (plan.saturation().isEmpty()) {
+            return Optional.of("the medium holds air on purpose");
+        }
+        if (plan.pressure().isEmpty()) {
+            return Optional.of("the chamber's absolute pressure is not known");
+        }
+        if (plan.inSteam().isEmpty()) {
+            return Optional.of("no temperature channel stands in the chamber's steam");
+        }
+        return phases.hold().isEmpty() ? Optional.of("no hold phase was reached") : Optional.empty();
+    }
+
+    private static Column saturationOf(Column pascal) {
+        return new Column() {
+            @Override
+            public int size() {
+                return pascal.size();
+            }
+
+            @Override
+            public double at(int index) {
+                return Departure.saturationKelvin(pascal, index);
+            }
+        };
+    }
+
+    private static Column unknown(int size) {
+        double[] values = new double[size];
+        Arrays.fill(values, Double.NaN);
+        return Column.of(values);
+    }
+}

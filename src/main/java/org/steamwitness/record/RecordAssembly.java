@@ -1,0 +1,183 @@
+package org.steamwitness.record;
+
+import java.time.LocalTime;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.steamwitness.evaluate.criteria.Criterion;
+import org.steamwitness.evaluate.criteria.Verdict;
+import org.steamwitness.finding.Finding;
+import org.steamwitness.plan.Plan;
+import org.steamwitness.plan.RunSheet;
+import org.steamwitness.trace.Reading;
+
+/** Puts a record together from its evidence: one part a question, in the order of the record. */
+public final class RecordAssembly {
+
+    private final Evidence evidence;
+
+    private RecordAssembly(Evidence evidence) {
+        this.evidence = evidence;
+    }
+
+    /**
+     * Puts the record together.
+     *
+     * @param evidence all that it is made from
+     * @return the record
+     */
+    public static CycleRecord of(Evidence evidence) {
+        return new RecordAssembly(evidence).record();
+    }
+
+    private CycleRecord record() {
+        return new CycleRecord(
+                CycleRecord.SCHEMA,
+                evidence.provenance(),
+                reading(),
+                run(),
+                plan(),
+                new ChannelParts(evidence).all(),
+                new PhaseParts(evidence).all(),
+                Given.withheld("pressure pulses are not looked for in a retort cycle"),
+                new SaturationParts(evidence).part(),
+                new HoldParts(evidence).part(),
+                new LethalityParts(evidence).all(),
+                Given.withheld("this version of the program does not evaluate energy"),
+                Given.withheld("the plan asks for no air leakage test"),
+                criteria(),
+                verdict(),
+                findings(),
+                NotJudgedList.of(evidence),
+                Cautions.all());
+    }
+
+    private ReadingPart reading() {
+        Reading reading = evidence.reading();
+        List<ReadingPart.Range> ranges = reading.refused().stream()
+                .map(r -> new ReadingPart.Range(r.fromLine(), r.toLine(), r.column(), r.reason()))
+                .toList();
+        return new ReadingPart(
+                reading.encoding(),
+                reading.delimiter(),
+                reading.decimalMark(),
+                reading.timeFormat(),
+                Given.entered(evidence.sheet().zone(), "zone"),
+                reading.headerLines(),
+                reading.rows(),
+                new ReadingPart.Refused(reading.refusedRows(), ranges));
+    }
+
+    private RunPart run() {
+        RunSheet sheet = evidence.sheet();
+        return new RunPart(
+                true,
+                sheet.run(),
+                new RunPart.PlanUsed(sheet.planId(), sheet.planRevision()),
+                sheet.equipment(),
+                Given.entered(sheet.zone(), "zone"),
+                Given.entered(sheet.atmospherePascal().map(Canonical::kilopascal), "atmosphere"),
+                Given.entered(sheet.product().map(RecordAssembly::product), "product"),
+                Given.entered(sheet.initialTemperature().map(RecordAssembly::initial), "initial-temperature"),
+                new RunPart.Marks(
+                        Given.entered(sheet.steamOn().map(LocalTime::toString), "marks.steam-on"),
+                        Given.entered(sheet.ventClosed().map(LocalTime::toString), "marks.vent-closed"),
+                        Given.entered(sheet.steamOff().map(LocalTime::toString), "marks.steam-off")),
+                new RunPart.Entered(sheet.entered().by(), sheet.entered().at()));
+    }
+
+    private static RunPart.Product product(RunSheet.Product product) {
+        return new RunPart.Product(
+                product.name(),
+                Given.entered(product.code(), "product.code"),
+                Given.entered(Optional.of(product.lots()).filter(lots -> !lots.isEmpty()), "product.lots"),
+                Given.entered(product.container(), "product.container"),
+                Given.entered(product.count(), "product.count"));
+    }
+
+    private static RunPart.InitialTemperature initial(RunSheet.InitialTemperature initial) {
+        return new RunPart.InitialTemperature(
+                Canonical.celsius(initial.kelvin()),
+                Given.entered(initial.at().map(LocalTime::toString), "initial-temperature.at"),
+                Given.entered(initial.instrument(), "initial-temperature.instrument"));
+    }
+
+    private PlanPart plan() {
+        Plan plan = evidence.plan();
+        Plan.Basis basis = plan.basis();
+        return new PlanPart(
+                plan.id(),
+                plan.title(),
+                plan.revision(),
+                plan.status().word(),
+                new PlanPart.Basis(basis.document(), basis.edition(), basis.by(), basis.date()),
+                plan.equipment(),
+                plan.process().word(),
+                plan.medium().word(),
+                new PlanPart.Decision(
+                        plan.decision().word(),
+                        plan.decision().guarded()
+                                ? Given.ofNumber(plan.decision().conformance())
+                                : Given.withheld("the simple rule knows none")));
+    }
+
+    private List<CriterionPart> criteria() {
+        return evidence.evaluation().criteria().stream().map(this::criterion).toList();
+    }
+
+    private CriterionPart criterion(Criterion criterion) {
+        return new CriterionPart(
+                criterion.id(),
+                criterion.what(),
+                criterion.where(),
+                criterion.phase(),
+                criterion.unit(),
+                Given.numberOr(criterion.value(), criterion.why()),
+                Canonical.number(criterion.limit()),
+                criterion.atLeast() ? "at least" : "at most",
+                Given.numberOr(criterion.margin(), criterion.why()),
+                atSeconds(criterion),
+                Given.numberOr(criterion.uncertainty(), "the value carries none, or none is stated"),
+                criterion.decision().word(),
+                criterion.why(),
+                evidence.plan().decision().word(),
+                evidence.plan().basis().document(),
+                evidence.plan().basis().edition());
+    }
+
+    private Given<Double> atSeconds(Criterion criterion) {
+        return criterion
+                .index()
+                .map(i -> Given.ofNumber(evidence.trace().seconds().at(i)))
+                .orElseGet(() -> Given.withheld("it belongs to no single sample"));
+    }
+
+    private VerdictPart verdict() {
+        Verdict verdict = evidence.evaluation().verdict();
+        Given<VerdictPart.Closest> closest = verdict.closest()
+                .map(c -> Given.of(new VerdictPart.Closest(
+                        c.id(), Canonical.number(c.margin().orElseThrow()), c.unit(), c.where(), atSeconds(c))))
+                .orElseGet(() -> Given.withheld("no criterion has a value"));
+        return new VerdictPart(verdict.outcome().word(), verdict.because(), closest);
+    }
+
+    private List<FindingPart> findings() {
+        List<FindingPart> parts = new ArrayList<>();
+        for (Finding finding : evidence.evaluation().findings()) {
+            List<FindingPart.Fact> facts = finding.facts().entrySet().stream()
+                    .map(fact -> new FindingPart.Fact(fact.getKey(), fact.getValue()))
+                    .toList();
+            parts.add(new FindingPart(
+                    "finding-" + (parts.size() + 1),
+                    finding.kind().word(),
+                    finding.severity().word(),
+                    finding.position().inFile()
+                            ? Given.of(finding.position().text())
+                            : Given.withheld("it concerns the run as a whole"),
+                    facts,
+                    finding.text(),
+                    finding.remedy()));
+        }
+        return List.copyOf(parts);
+    }
+}
