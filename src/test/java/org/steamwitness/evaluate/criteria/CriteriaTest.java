@@ -1,0 +1,219 @@
+package org.steamwitness.evaluate.criteria;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.steamwitness.evaluate.Bench;
+import org.steamwitness.evaluate.Evaluation;
+import org.steamwitness.evaluate.criteria.Verdict.Outcome;
+import org.steamwitness.finding.Finding;
+import org.steamwitness.finding.FindingKind;
+import org.steamwitness.finding.Position;
+import org.steamwitness.plan.DecisionRule;
+import org.steamwitness.plan.LethalityAim;
+import org.steamwitness.trace.Place;
+import org.steamwitness.trace.Reading;
+
+class CriteriaTest {
+
+    private static final Reading READING =
+            new Reading("UTF-8", "comma", "full stop", "ISO 8601 without zone", List.of(), 0, List.of(), List.of());
+
+    /** One-sided quantiles of the normal distribution as printed in tables of JCGM 106's guard bands. */
+    @ParameterizedTest
+    @CsvSource({"0.80, 0.8416", "0.85, 1.0364", "0.90, 1.2816", "0.95, 1.6449", "0.99, 2.3263", "0.999, 3.0902"})
+    void theGuardBandIsTheQuantileOfTheConformanceProbability(double conformance, double z) {
+        assertThat(GuardBand.z(new DecisionRule(true, conformance))).isCloseTo(z, within(5e-5));
+        assertThat(GuardBand.z(DecisionRule.SIMPLE)).isZero();
+    }
+
+    /** Twelve samples inside at 5 s prove 55 s; the samples around them leave 65 s possible. */
+    @ParameterizedTest
+    @CsvSource({
+        "55, true, MET",
+        "56, true, UNDECIDED",
+        "65, true, UNDECIDED",
+        "66, true, NOT_MET",
+        "55, false, MET",
+        "56, false, NOT_MET"
+    })
+    void holdingTimeIsMetOnlyByWhatTheSamplesProve(double required, boolean guarded, Decision decision) {
+        double[] celsius = new double[20];
+        Arrays.fill(celsius, 100);
+        Arrays.fill(celsius, 4, 16, 122);
+        Evaluation evaluation = evaluate(Bench.every(5, 20)
+                .holding(required)
+                .deciding(guarded ? new DecisionRule(true, 0.95) : DecisionRule.SIMPLE)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius)));
+        Criterion time = evaluation.criteria().get(0);
+        assertThat(time.decision()).isEqualTo(decision);
+        assertThat(time.value()).hasValue(55);
+        assertThat(time.margin()).hasValue(55 - required);
+    }
+
+    @Test
+    void aHoldNeverReachedIsNotMetAndNotMissing() {
+        Evaluation evaluation =
+                evaluate(Bench.every(5, 4).with(Bench.temperature("chamber", Place.REFERENCE, 0.1, 20, 60, 100, 60)));
+        assertThat(evaluation.criteria().get(0).value()).hasValue(0);
+        assertThat(evaluation.verdict().outcome()).isEqualTo(Outcome.NOT_MET);
+    }
+
+    @ParameterizedTest
+    @CsvSource({"290, MET", "300, UNDECIDED", "310, NOT_MET"})
+    void lethalityIsGuardedByTheSensorsSharedUncertainty(double minimum, Decision decision) {
+        double[] reference = new double[61];
+        Arrays.fill(reference, 121.11);
+        double[] chamber = new double[61];
+        Arrays.fill(chamber, 122);
+        Evaluation evaluation = evaluate(Bench.every(5, 61)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.05, chamber),
+                        Bench.temperature("can-1", Place.PRODUCT, 0.05, reference))
+                .aiming(new LethalityAim("F0", 121.11 + 273.15, 10, OptionalDouble.empty(), minimum, true)));
+        Criterion lethality = evaluation.criteria().get(2);
+        assertThat(lethality.value().orElseThrow()).isCloseTo(5, within(1e-9));
+        assertThat(lethality.uncertainty().orElseThrow())
+                .isCloseTo(5 * Math.log(10) / 10 * 0.05, within(1e-3 * 0.0576));
+        assertThat(lethality.decision()).isEqualTo(decision);
+    }
+
+    @Test
+    void lethalityWithoutAProductProbeDoesNotApply() {
+        Evaluation evaluation = evaluate(Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)))
+                .aiming(new LethalityAim("F0", 121.11 + 273.15, 10, OptionalDouble.empty(), 60, true)));
+        assertThat(evaluation.criteria().get(2).decision()).isEqualTo(Decision.NOT_APPLICABLE);
+    }
+
+    @Test
+    void saturationWithoutPressureIsUndecided() {
+        Evaluation evaluation =
+                evaluate(Bench.every(5, 20).with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20))));
+        Criterion saturation = evaluation.criteria().get(1);
+        assertThat(saturation.decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(saturation.why()).isEqualTo("not judged: the chamber's absolute pressure is not known");
+        assertThat(saturation.value()).isEmpty();
+    }
+
+    @Test
+    void notMetGoesBeforeUndecidedAndUndecidedBeforeMet() {
+        Criterion met = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.MET);
+        Criterion open = criterion(Criterion.Subject.SATURATION, Decision.UNDECIDED);
+        Criterion failed = criterion(Criterion.Subject.LETHALITY, Decision.NOT_MET);
+        assertThat(outcome(List.of(met), List.of())).isEqualTo(Outcome.MET);
+        assertThat(outcome(List.of(met, open), List.of())).isEqualTo(Outcome.UNDECIDED);
+        assertThat(outcome(List.of(met, open, failed), List.of())).isEqualTo(Outcome.NOT_MET);
+    }
+
+    @Test
+    void aBlockingFindingLeavesTheVerdictUndecidedAtBest() {
+        Criterion met = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.MET);
+        Criterion failed = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.NOT_MET);
+        List<Finding> blocking = List.of(new Finding(FindingKind.LOG_ENDS_IN_HOLD, Position.RUN, Map.of()));
+        assertThat(outcome(List.of(met), blocking)).isEqualTo(Outcome.UNDECIDED);
+        assertThat(outcome(List.of(failed), blocking)).isEqualTo(Outcome.NOT_MET);
+        assertThat(Verdict.of(List.of(met), blocking, false).because())
+                .containsExactly("The log ends in the hold phase.");
+    }
+
+    @Test
+    void withoutADecidedTimeOrTemperatureNothingIsJudged() {
+        assertThat(outcome(List.of(criterion(Criterion.Subject.LETHALITY, Decision.MET)), List.of()))
+                .isEqualTo(Outcome.NOTHING_JUDGED);
+        assertThat(outcome(
+                        List.of(criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.NOT_APPLICABLE)), List.of()))
+                .isEqualTo(Outcome.NOTHING_JUDGED);
+    }
+
+    @Test
+    void aDraftPlanGivesNoVerdict() {
+        Criterion failed = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.NOT_MET);
+        assertThat(Verdict.of(List.of(failed), List.of(), true).outcome()).isEqualTo(Outcome.DRAFT_PLAN);
+    }
+
+    @Test
+    void aLogThatEndsInTheHoldIsBlocked() {
+        Evaluation evaluation = evaluate(Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)), Bench.pressure(1, steam(20))));
+        assertThat(evaluation.findings()).extracting(Finding::kind).containsExactly(FindingKind.LOG_ENDS_IN_HOLD);
+        assertThat(evaluation.verdict().outcome()).isEqualTo(Outcome.UNDECIDED);
+    }
+
+    @Test
+    void rowsRefusedInTheHoldAreBlocking() {
+        Reading reading = new Reading(
+                "UTF-8",
+                "comma",
+                "full stop",
+                "ISO 8601 without zone",
+                List.of(),
+                0,
+                List.of(),
+                List.of(new Reading.RefusedRows(9, 9, 1, "whole row", "its time is wrong")));
+        double[] celsius = held(20);
+        celsius[19] = 60;
+        Bench bench = Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius), Bench.pressure(1, steam(20)));
+        Evaluation evaluation = Evaluation.of(bench.trace(), reading, bench.plan(), List.of());
+        assertThat(evaluation.findings()).extracting(Finding::kind).containsExactly(FindingKind.ROWS_REFUSED_IN_HOLD);
+        assertThat(evaluate(bench).verdict().outcome()).isEqualTo(Outcome.MET);
+        assertThat(evaluation.verdict().outcome()).isEqualTo(Outcome.UNDECIDED);
+    }
+
+    @Test
+    void samplesMissingInTheHoldAreBlocking() {
+        double[] celsius = held(20);
+        celsius[8] = Double.NaN;
+        celsius[19] = 60;
+        Evaluation evaluation = evaluate(Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius), Bench.pressure(1, steam(20))));
+        assertThat(evaluation.findings())
+                .extracting(Finding::text)
+                .containsExactly("1 samples of chamber are missing in the hold phase.");
+    }
+
+    private static Outcome outcome(List<Criterion> criteria, List<Finding> findings) {
+        return Verdict.of(criteria, findings, false).outcome();
+    }
+
+    private static Criterion criterion(Criterion.Subject subject, Decision decision) {
+        return new Criterion(
+                "id",
+                subject,
+                "what",
+                "where",
+                "hold",
+                "s",
+                OptionalDouble.of(1),
+                1,
+                true,
+                OptionalDouble.empty(),
+                java.util.Optional.empty(),
+                decision,
+                "why");
+    }
+
+    private static double[] held(int samples) {
+        double[] celsius = new double[samples];
+        Arrays.fill(celsius, 122);
+        return celsius;
+    }
+
+    private static double[] steam(int samples) {
+        double[] kilopascal = new double[samples];
+        Arrays.fill(kilopascal, 211.59);
+        return kilopascal;
+    }
+
+    private static Evaluation evaluate(Bench bench) {
+        return Evaluation.of(bench.trace(), READING, bench.plan(), List.of());
+    }
+}
