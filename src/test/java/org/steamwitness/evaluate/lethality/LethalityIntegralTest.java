@@ -17,7 +17,7 @@ class LethalityIntegralTest {
 
     /** Closed form over piecewise straight temperatures, reference/lethality-segments.csv, to 1e-9 of the value. */
     @ParameterizedTest(name = "{0}")
-    @CsvFileSource(resources = "/reference/lethality-segments.csv", delimiter = ';', numLinesToSkip = 2)
+    @CsvFileSource(resources = "/reference/lethality-segments.csv", delimiter = ';', useHeadersInDisplayName = true)
     void equalsTheClosedForm(
             String trace, String times, String temperatures, double reference, double z, double exact) {
         double[] t = numbers(times);

@@ -22,7 +22,7 @@ class SaturationCheckTest {
      * in the departure.
      */
     @ParameterizedTest(name = "{0} degC at {1} kPa")
-    @CsvFileSource(resources = "/reference/air-fraction.csv", numLinesToSkip = 2)
+    @CsvFileSource(resources = "/reference/air-fraction.csv", useHeadersInDisplayName = true)
     void agreesWithDaltonsLaw(
             double celsius, double kilopascal, double saturation, double air, double boiling, double departure) {
         Departure measured = departure(0.1, 1, celsius, kilopascal);
@@ -32,7 +32,7 @@ class SaturationCheckTest {
 
     /** Law of propagation with slopes of IAPWS-95, reference/uncertainty-dT.csv, to 1e-4 K. */
     @ParameterizedTest(name = "{0} degC, u(T) {2} K, u(p) {3} kPa")
-    @CsvFileSource(resources = "/reference/uncertainty-dT.csv", numLinesToSkip = 2)
+    @CsvFileSource(resources = "/reference/uncertainty-dT.csv", useHeadersInDisplayName = true)
     void propagatesBothUncertainties(double celsius, double slope, double uKelvin, double uKilopascal, double u) {
         double kilopascal = org.steamwitness.steam.Saturation.pascalAt(celsius + 273.15) / 1000;
         assertThat(departure(uKelvin, uKilopascal, celsius, kilopascal).uncertaintyAt(0))
