@@ -110,7 +110,7 @@ final class EvaluateCommand implements Callable<Integer> {
     private ExitCode written(RunFiles files, Outcome.Evaluated evaluated) throws RecordFolder.NotWrittenException {
         RecordFolder.Written written = new RecordFolder(out, replace).write(files.name(), evaluated);
         PrintWriter page = spec.commandLine().getOut();
-        TerminalPage.of(evaluated.record()).forEach(line -> page.print(line + "\n"));
+        TerminalPage.of(evaluated.record()).forEach(line -> page.print(Harmless.text(line) + "\n"));
         page.print("Record       " + written.pdf() + "\n             " + written.json() + "\n");
         page.flush();
         return ExitCode.ofOutcome(evaluated.record().verdict().outcome());
@@ -123,7 +123,7 @@ final class EvaluateCommand implements Callable<Integer> {
 
     private void trouble(String message) {
         PrintWriter err = spec.commandLine().getErr();
-        err.print(message + "\n");
+        err.print(Harmless.text(message) + "\n");
         err.flush();
     }
 }

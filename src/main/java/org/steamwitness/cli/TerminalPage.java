@@ -36,7 +36,11 @@ final class TerminalPage {
         record.lethality().forEach(this::lethality);
         wrapped(
                 "Not judged   ",
-                String.join("; ", record.notJudged().stream().map(n -> n.what()).toList()));
+                String.join(
+                        "; ",
+                        record.notJudged().stream()
+                                .map(n -> n.what() + ": " + n.why())
+                                .toList()));
         findings();
         wrapped("Caution      ", record.cautions().get(0).text());
         return List.copyOf(lines);

@@ -74,6 +74,11 @@ public enum FindingKind {
             Severity.BLOCKS,
             "{samples} samples of {channel} are missing in the hold phase.",
             "A person has to judge whether the hold phase is proven without them."),
+    /** A channel that stands still from the first sample to the last. */
+    CHANNEL_NEVER_CHANGES(
+            Severity.BLOCKS,
+            "The channel {channel} shows one value, {value}, in all of its {samples} samples.",
+            "Look for a dead sensor or a logger that held its last value; a person has to judge the run."),
     /** Time between samples beyond the plan's longest gap. */
     GAP(
             Severity.REVIEW,

@@ -12,19 +12,16 @@ final class NotJudgedList {
     static List<NotJudged> of(Evidence evidence) {
         List<NotJudged> list = new ArrayList<>();
         evidence.evaluation().saturation().notJudged().ifPresent(why -> list.add(new NotJudged("saturation", why)));
-        list.add(new NotJudged("air away from the probes", "a probe sees the steam around itself only"));
+        list.add(new NotJudged("air away from the probes", "a probe sees only the steam around it"));
         if (evidence.bound().inProduct().isEmpty()) {
             list.add(new NotJudged(
                     "product lethality", "not measured; judged by time, temperature and initial temperature"));
         }
-        list.add(new NotJudged("energy", "this version of the program does not evaluate it"));
+        list.add(new NotJudged("energy", "not evaluated by this version"));
+        list.add(new NotJudged("sensors (noise, lag, drift, slipped probes)", "not evaluated by this version"));
         list.add(new NotJudged(
-                "state of the sensors (noise, lag, drift, slipped probes)",
-                "this version of the program does not evaluate it"));
-        list.add(new NotJudged(
-                "vent, initial temperature, recorder against indicating device, cooling",
-                "the plan sets no criterion for them; the scheduled process may"));
-        list.add(new NotJudged("product safety", "the record documents a run; qualified people decide"));
+                "vent, initial temperature, indicating device, cooling", "the plan sets no criterion for them"));
+        list.add(new NotJudged("product safety", "for qualified people to decide"));
         return List.copyOf(list);
     }
 }

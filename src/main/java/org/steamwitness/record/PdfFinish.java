@@ -41,14 +41,17 @@ final class PdfFinish {
         embedded.setSize(attachment.bytes().length);
         embedded.setCreationDate(calendar());
         embedded.setModDate(calendar());
+        String name = files.containsKey(attachment.name())
+                ? attachment.relation().words() + " " + attachment.name()
+                : attachment.name();
         PDComplexFileSpecification file = new PDComplexFileSpecification();
-        file.setFile(attachment.name());
-        file.setFileUnicode(attachment.name());
+        file.setFile(name);
+        file.setFileUnicode(name);
         file.setFileDescription(attachment.relation().words());
         file.setEmbeddedFile(embedded);
         file.setEmbeddedFileUnicode(embedded);
         file.getCOSObject().setName("AFRelationship", attachment.relation().pdfName());
-        files.put(attachment.name(), file);
+        files.put(name, file);
     }
 
     /** Lists the attached files and replaces every trace of the machine's clock. */

@@ -3,10 +3,13 @@ package org.steamwitness.record;
 import java.time.LocalTime;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.steamwitness.evaluate.criteria.Criterion;
 import org.steamwitness.evaluate.criteria.Verdict;
 import org.steamwitness.finding.Finding;
+import org.steamwitness.finding.FindingKind;
+import org.steamwitness.finding.Position;
 import org.steamwitness.plan.Plan;
 import org.steamwitness.plan.RunSheet;
 import org.steamwitness.trace.Reading;
@@ -15,9 +18,11 @@ import org.steamwitness.trace.Reading;
 public final class RecordAssembly {
 
     private final Evidence evidence;
+    private final List<Finding> more;
 
-    private RecordAssembly(Evidence evidence) {
+    private RecordAssembly(Evidence evidence, List<Finding> more) {
         this.evidence = evidence;
+        this.more = more;
     }
 
     /**
@@ -27,7 +32,13 @@ public final class RecordAssembly {
      * @return the record
      */
     public static CycleRecord of(Evidence evidence) {
-        return new RecordAssembly(evidence).record();
+        CycleRecord record = new RecordAssembly(evidence, List.of()).record();
+        String missing = PrintableCharacters.missingFrom(record);
+        if (missing.isEmpty()) {
+            return record;
+        }
+        Finding unprintable = new Finding(FindingKind.GLYPH_MISSING, Position.RUN, Map.of("characters", missing));
+        return new RecordAssembly(evidence, List.of(unprintable)).record();
     }
 
     private CycleRecord record() {
@@ -163,7 +174,9 @@ public final class RecordAssembly {
 
     private List<FindingPart> findings() {
         List<FindingPart> parts = new ArrayList<>();
-        for (Finding finding : evidence.evaluation().findings()) {
+        List<Finding> all = new ArrayList<>(evidence.evaluation().findings());
+        all.addAll(more);
+        for (Finding finding : all) {
             List<FindingPart.Fact> facts = finding.facts().entrySet().stream()
                     .map(fact -> new FindingPart.Fact(fact.getKey(), fact.getValue()))
                     .toList();

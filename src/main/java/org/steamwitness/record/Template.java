@@ -11,6 +11,7 @@ import java.io.Reader;
 import java.io.StringReader;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
+import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
@@ -21,6 +22,7 @@ import java.util.Map;
  */
 public final class Template {
 
+    private static final int REPLACEMENT = 0xFFFD;
     private static final String STANDARD = "cycle-record.xhtml";
 
     private final String name;
@@ -89,6 +91,24 @@ public final class Template {
 
         StrictFactory() {
             setObjectHandler(new MapsOnly());
+        }
+
+        /** Escapes for XML, and shows what XML can't hold as the replacement character. */
+        @Override
+        public void encode(String value, Writer writer) {
+            super.encode(
+                    value.codePoints()
+                            .map(c -> printable(c) ? c : REPLACEMENT)
+                            .collect(StringBuilder::new, StringBuilder::appendCodePoint, StringBuilder::append)
+                            .toString(),
+                    writer);
+        }
+
+        private static boolean printable(int c) {
+            return (c >= 0x20 && c <= 0x7E)
+                    || (c >= 0xA0 && c <= 0xD7FF)
+                    || (c >= 0xE000 && c <= 0xFFFD)
+                    || c >= 0x10000;
         }
 
         @Override

@@ -1,6 +1,7 @@
 package org.steamwitness.run;
 
 import java.io.IOException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -51,10 +52,16 @@ public final class RecordFolder {
             Files.move(newPdf, pdf, StandardCopyOption.REPLACE_EXISTING, StandardCopyOption.ATOMIC_MOVE);
             Files.move(newJson, json, StandardCopyOption.REPLACE_EXISTING, StandardCopyOption.ATOMIC_MOVE);
         } catch (IOException wrong) {
-            throw new NotWrittenException("the record cannot be written to the folder " + folder + " ("
-                    + wrong.getClass().getSimpleName() + "); name a folder that can be written to with --out");
+            throw new NotWrittenException("the record cannot be written to the folder " + folder + reason(wrong)
+                    + "; name a folder that can be written to with --out");
         }
         return new Written(pdf, json);
+    }
+
+    private static String reason(IOException wrong) {
+        return wrong instanceof FileSystemException file && file.getReason() != null
+                ? " (" + file.getReason() + ")"
+                : "";
     }
 
     private boolean sameFiles(Path json, Outcome.Evaluated evaluated) throws IOException {

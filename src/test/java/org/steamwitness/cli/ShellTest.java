@@ -46,7 +46,8 @@ class ShellTest {
         change(plan, "duration: 42 min", "duration: 50 min");
         assertThat(evaluate()).isEqualTo(1);
         assertThat(out.toString())
-                .contains("Criteria of the plan: not met", "because    holding time: proven 45 min 45 s");
+                .contains(
+                        "Criteria of the plan: not met", "because    holding time: 45 min 45 s of 50 min 00 s proven");
     }
 
     @Test
@@ -69,6 +70,27 @@ class ShellTest {
         assertThat(evaluate()).isEqualTo(2);
         assertThat(out.toString())
                 .contains("The plan requires the entry atmosphere, which the run sheet does not hold.");
+    }
+
+    @Test
+    void exits2WhenAChannelNeverChanges() throws IOException {
+        Files.write(
+                log,
+                Files.readAllLines(log).stream()
+                        .map(row -> row.startsWith("time") ? row : row.replaceFirst(",[^,]*$", ",121.50"))
+                        .toList());
+        assertThat(evaluate()).isEqualTo(2);
+        assertThat(out.toString())
+                .contains("The channel can-2 shows one value, 121.50 °C, in all of its 1441 samples.");
+    }
+
+    @Test
+    void printsWhatItCanOfHostileAndForeignText() throws IOException {
+        change(sheet, "name: bean stew", "name: \"bean\\u0001 <b>&stew\\u0085 豆\"");
+        assertThat(evaluate()).isZero();
+        assertThat(Files.readString(folder.resolve("records/R2-0314.record.json")))
+                .contains("The printed record cannot show these characters: U+0085 U+8C46.");
+        assertThat(out.toString()).contains("bean\uFFFD <b>&stew\uFFFD 豆");
     }
 
     @Test

@@ -30,17 +30,18 @@ final class HoldingTime {
                 OptionalDouble.empty(),
                 Optional.empty(),
                 decision,
-                why(decision, hold));
+                why(decision, hold, limit));
     }
 
-    private static String why(Decision decision, HoldResult hold) {
+    private static String why(Decision decision, HoldResult hold, double limit) {
+        String required = " of " + Printed.duration(limit);
         if (hold.possibleSeconds() == 0) {
-            return "the band was never held";
+            return "0 s" + required + ", the band was never held";
         }
-        String proven = "proven " + Printed.duration(hold.provenSeconds());
+        String proven = Printed.duration(hold.provenSeconds()) + required + " proven";
         return decision == Decision.UNDECIDED
-                ? proven + ", possible " + Printed.duration(hold.possibleSeconds())
-                        + ": the sampling interval leaves it open"
+                ? proven + ", " + Printed.duration(hold.possibleSeconds())
+                        + " possible: the sampling interval leaves it open"
                 : proven;
     }
 }

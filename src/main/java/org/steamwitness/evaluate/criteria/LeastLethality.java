@@ -4,6 +4,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.steamwitness.evaluate.lethality.Lethality;
 import org.steamwitness.evaluate.lethality.ProbeLethality;
+import org.steamwitness.quantity.Printed;
 
 /** The product probe that reached the least lethality reached the plan's minimum. */
 final class LeastLethality {
@@ -40,7 +41,8 @@ final class LeastLethality {
                                 lethality.aim().minimumSeconds()))
                         .orElse(Decision.NOT_APPLICABLE),
                 governing
-                        .map(p -> "least of " + lethality.probes().size() + " product probes")
+                        .map(p -> Printed.fixed(value.orElseThrow(), 2) + " min of " + Printed.fixed(limit, 2)
+                                + " min, least of " + lethality.probes().size() + " product probes")
                         .orElse("not measured: no product probe; judged by time and temperature"));
     }
 

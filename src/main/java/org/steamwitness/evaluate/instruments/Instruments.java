@@ -9,15 +9,22 @@ import org.steamwitness.finding.Position;
 import org.steamwitness.plan.BoundChannel;
 import org.steamwitness.plan.BoundPlan;
 import org.steamwitness.quantity.Printed;
+import org.steamwitness.quantity.TemperatureUnit;
+import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.Trace;
 
 /**
  * What the log shows of its channels and its sampling.
  *
  * @param channels one measure a channel, in the order of the plan
- * @param findings gaps in the sampling
+ * @param findings gaps in the sampling and channels that never change
  */
 public record Instruments(List<ChannelMeasure> channels, List<Finding> findings) {
+
+    /** Fewer samples may be alike by chance; common practice, no source. */
+    private static final int FEWEST_FOR_STILLNESS = 60;
+
+    private static final double PASCAL_PER_KILOPASCAL = 1e3;
 
     /**
      * Measures all channels.
@@ -27,8 +34,14 @@ public record Instruments(List<ChannelMeasure> channels, List<Finding> findings)
      * @return measures and findings
      */
     public static Instruments of(Trace trace, BoundPlan plan) {
-        return new Instruments(
-                plan.channels().stream().map(ChannelMeasure::of).toList(), gaps(trace, plan.longestGapSeconds()));
+        List<ChannelMeasure> channels =
+                plan.channels().stream().map(ChannelMeasure::of).toList();
+        List<Finding> findings = new ArrayList<>(gaps(trace, plan.longestGapSeconds()));
+        channels.stream()
+                .filter(Instruments::standsStill)
+                .map(Instruments::still)
+                .forEach(findings::add);
+        return new Instruments(channels, List.copyOf(findings));
     }
 
     /**
@@ -42,6 +55,25 @@ public record Instruments(List<ChannelMeasure> channels, List<Finding> findings)
                 .filter(m -> m.channel().equals(channel))
                 .findFirst()
                 .orElseThrow();
+    }
+
+    /** Whole runs heat up and cool down: a channel that shows one value throughout measured nothing. */
+    private static boolean standsStill(ChannelMeasure measure) {
+        return measure.samples() >= FEWEST_FOR_STILLNESS && measure.lowest() == measure.highest();
+    }
+
+    private static Finding still(ChannelMeasure measure) {
+        boolean pressure = measure.channel().kind() == QuantityKind.PRESSURE;
+        String value = pressure
+                ? Printed.fixed(measure.lowest() / PASCAL_PER_KILOPASCAL, 2) + " kPa absolute"
+                : Printed.fixed(TemperatureUnit.CELSIUS.ofKelvin(measure.lowest()), 2) + " °C";
+        return new Finding(
+                FindingKind.CHANNEL_NEVER_CHANGES,
+                Position.RUN,
+                Map.of(
+                        "channel", measure.channel().name(),
+                        "value", value,
+                        "samples", Integer.toString(measure.samples())));
     }
 
     private static List<Finding> gaps(Trace trace, double longestGapSeconds) {
