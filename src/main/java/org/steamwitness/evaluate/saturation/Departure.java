@@ -33,11 +33,13 @@ public final class Departure {
      * Departure of a sample.
      *
      * @param index of the sample
-     * @return kelvin; NaN where a sample is missing or the pressure lies off the saturation line
+     * @return kelvin; NaN where a sample is missing, or temperature or pressure lies off the saturation line
      */
     public double kelvinAt(int index) {
-        return probe.channel().values().at(index)
-                - saturationKelvin(pressure.channel().values(), index);
+        double kelvin = probe.channel().values().at(index);
+        return kelvin >= Saturation.LOWEST_KELVIN && kelvin <= Saturation.HIGHEST_KELVIN
+                ? kelvin - saturationKelvin(pressure.channel().values(), index)
+                : Double.NaN;
     }
 
     /**

@@ -93,9 +93,21 @@ class SaturationCheckTest {
     }
 
     @Test
+    void faultCodesOfAProbeAreCountedAndNotJudged() {
+        double[] celsius = series(122, 30);
+        celsius[12] = 850;
+        celsius[13] = -200;
+        SaturationCheck check = check(celsius, 0.1, 1);
+        assertThat(check.episodes()).isEmpty();
+        assertThat(check.perPhase()).anyMatch(p -> p.states().getOrDefault(SampleState.NOT_JUDGED, 0) == 2);
+    }
+
+    @Test
     void samplesOffTheSaturationLineAreNotJudged() {
         assertThat(departure(0.1, 1, 20, 0.3).kelvinAt(0)).isNaN();
         assertThat(departure(0.1, 1, Double.NaN, 205).kelvinAt(0)).isNaN();
+        assertThat(departure(0.1, 1, 850, 205).kelvinAt(0)).isNaN();
+        assertThat(departure(0.1, 1, -200, 205).kelvinAt(0)).isNaN();
     }
 
     /** 1 K of tolerance and 1.645 u at 122 degC: 0.155 K/kPa gives 3.3 % of air a kelvin (IAPWS-95). */
