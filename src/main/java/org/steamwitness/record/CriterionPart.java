@@ -10,7 +10,8 @@ package org.steamwitness.record;
  * @param unit unit of value, limit, margin and uncertainty
  * @param value measured value
  * @param limit the plan's limit
- * @param side "at least" or "at most"
+ * @param atLeast the limit, if the value has to reach it
+ * @param atMost the limit, if the value may not exceed it
  * @param margin how far the value lies on the right side
  * @param atSeconds when the value was read
  * @param uncertainty standard uncertainty of the value
@@ -28,7 +29,8 @@ public record CriterionPart(
         String unit,
         Given<Double> value,
         double limit,
-        String side,
+        Given<Double> atLeast,
+        Given<Double> atMost,
         Given<Double> margin,
         Given<Double> atSeconds,
         Given<Double> uncertainty,
@@ -36,4 +38,14 @@ public record CriterionPart(
         String why,
         String rule,
         String source,
-        String edition) {}
+        String edition) {
+
+    /**
+     * The limit as people read it.
+     *
+     * @return "at least" or "at most"
+     */
+    public String side() {
+        return atLeast.value().isPresent() ? "at least" : "at most";
+    }
+}

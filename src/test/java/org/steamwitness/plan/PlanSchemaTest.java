@@ -1,0 +1,116 @@
+package org.steamwitness.plan;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.networknt.schema.Schema;
+import com.networknt.schema.SchemaRegistry;
+import com.networknt.schema.SpecificationVersion;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.snakeyaml.engine.v2.api.Load;
+import org.snakeyaml.engine.v2.api.LoadSettings;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.json.JsonMapper;
+
+/** The published shapes of plan and run sheet refuse what the program refuses. */
+class PlanSchemaTest {
+
+    private static final JsonMapper JSON = new JsonMapper();
+    private static final Schema PLAN = schema("plan-1");
+    private static final Schema SHEET = schema("run-1");
+
+    @Test
+    void theSampleKeepsBothShapes() throws IOException {
+        assertThat(PLAN.validate(tree(sample("R2-0314.plan.yaml")))).isEmpty();
+        assertThat(SHEET.validate(tree(sample("R2-0314.run.yaml")))).isEmpty();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            plan-format: 1         | plan-format: 2
+            title: Retort          | titel: Retort
+            revision: 3            | revision: 0
+            revision: 3            | revision: three
+            status: in-force       | status: released
+            process: retort        | process: cannery
+            process: retort        | process:
+            medium: saturated-steam | medium: air
+            atmosphere: entered    | atmosphere: 1013 hPa
+            121.1 degC             | 121,1 degC
+            121.1 degC             | 121.1
+            121.1 degC             | 121.1 K(a)
+            42 min                 | 42
+            42 min                 | 42 minutes
+            42 min                 | -42 min
+            datum: gauge           | datum: gage
+            datum: gauge,          | ''
+            quantity: pressure     | quantity: flow
+            place: drain           | place: sewer
+            contact: sealed        | contact: dry
+            coverage: 2            | coverage: 7
+            calibration: 0.02 bar  | calibration: 0.02 K
+            calibration: 0.2 K     | calibration: 0.2 degC
+            due: 2027-01-15        | due: 15.01.2027
+            air: 1.0 K             | air: 1.0 degC
+            {when: all,            | {when: any,
+            conformance: 95 %      | conformance: 0.95
+            rule: guarded          | rule: strict
+            {rule: guarded, conformance: 95 %} | {rule: simple, conformance: 95 %}
+            floor: none            | floor: nothing
+            channels: product      | channels: load
+            cooling: counted       | cooling: yes
+            required: [zone        | required: [zon
+            id: R2-stew-73x111     | id: [R2]
+            """)
+    void refusesBrokenPlansAsTheProgramDoes(String from, String to) throws IOException {
+        String text = sample("R2-0314.plan.yaml").replace(from, to);
+        assertThat(text).isNotEqualTo(sample("R2-0314.plan.yaml"));
+        assertThat(Plan.read("p.yaml", text.getBytes(StandardCharsets.UTF_8)).problems())
+                .isNotEmpty();
+        assertThat(PLAN.validate(tree(text))).isNotEmpty();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            run-format: 1          | run-format: 3
+            run: R2-0314           | runs: R2-0314
+            revision: 3            | revision: 3.5
+            atmosphere: 1008 hPa   | atmosphere: 1008
+            atmosphere: 1008 hPa   | atmosphere: 1.0 bar(g)
+            count: 1240            | count: many
+            count: 1240            | count: 0
+            lots: [L2291]          | lots: []
+            68.0 degC              | warm
+            steam-on: 08:12        | steam-on: 8:12
+            vent-closed: 08:19     | vent-closed: 25:19
+            steam-off: 09:10       | steam-of: 09:10
+            at: 2026-03-14T10:31+00:00 | at: 2026-03-14
+            by: operator 4,        | ''
+            """)
+    void refusesBrokenRunSheetsAsTheProgramDoes(String from, String to) throws IOException {
+        String text = sample("R2-0314.run.yaml").replace(from, to);
+        assertThat(text).isNotEqualTo(sample("R2-0314.run.yaml"));
+        assertThat(RunSheet.read("r.yaml", text.getBytes(StandardCharsets.UTF_8))
+                        .problems())
+                .isNotEmpty();
+        assertThat(SHEET.validate(tree(text))).isNotEmpty();
+    }
+
+    private static Schema schema(String name) {
+        return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
+                .getSchema(JSON.readTree(PlanSchemaTest.class.getResourceAsStream("schema/" + name + ".schema.json")));
+    }
+
+    private static JsonNode tree(String yaml) {
+        return JSON.valueToTree(new Load(LoadSettings.builder().build()).loadFromString(yaml));
+    }
+
+    private static String sample(String name) throws IOException {
+        return Files.readString(Path.of("sample-logs", name));
+    }
+}
