@@ -29,6 +29,9 @@ public final class Saturation {
     private static final double N9 = -0.23855557567849e0;
     private static final double N10 = 0.65017534844798e3;
 
+    /** Pressures that differ by less than this part are taken as equal: far above rounding, far below any sensor. */
+    static final double ROUNDING = 1e-9;
+
     private static final double PASCAL_PER_MEGAPASCAL = 1e6;
 
     private Saturation() {}

@@ -19,14 +19,14 @@ class SaturationTest {
     @ParameterizedTest(name = "water boils at {0} K under {1} MPa")
     @CsvSource({"300, 3.53658941e-03", "500, 2.63889776", "600, 12.3443146"})
     void reachesThePressuresOfTable35(double kelvin, double megapascal) {
-        assertThat(nineDigits(Saturation.pascalAt(kelvin) / 1e6)).isEqualTo(nineDigits(megapascal));
+        assertThat(Digits.nine(Saturation.pascalAt(kelvin) / 1e6)).isEqualTo(Digits.nine(megapascal));
     }
 
     /** IAPWS R7-97(2012), Table 36: equal when printed to the nine digits given. */
     @ParameterizedTest(name = "under {0} MPa water boils at {1} K")
     @CsvSource({"0.1, 372.755919", "1, 453.035632", "10, 584.149488"})
     void boilsAtTheTemperaturesOfTable36(double megapascal, double kelvin) {
-        assertThat(nineDigits(Saturation.kelvinAt(megapascal * 1e6))).isEqualTo(nineDigits(kelvin));
+        assertThat(Digits.nine(Saturation.kelvinAt(megapascal * 1e6))).isEqualTo(Digits.nine(kelvin));
     }
 
     /**
@@ -83,12 +83,5 @@ class SaturationTest {
                 .hasMessage("saturation pressure: temperature 273.14 K lies outside 273.15 to 647.096 K");
         assertThatThrownBy(() -> Saturation.pascalAt(Double.NaN)).isInstanceOf(OutOfRangeException.class);
         assertThatThrownBy(() -> Saturation.pascalAt(647.1)).isInstanceOf(OutOfRangeException.class);
-    }
-
-    private static String nineDigits(double value) {
-        return new java.math.BigDecimal(value)
-                .round(new java.math.MathContext(9))
-                .stripTrailingZeros()
-                .toPlainString();
     }
 }
