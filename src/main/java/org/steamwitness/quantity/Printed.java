@@ -50,6 +50,31 @@ public final class Printed {
     }
 
     /**
+     * Prints a temperature as plans write it, so that it can be read back.
+     *
+     * @param kelvin a temperature
+     * @param unit the unit to print
+     * @param decimals 0 to 12
+     * @return such as "121.10 degC"
+     */
+    public static String temperature(double kelvin, TemperatureUnit unit, int decimals) {
+        return fixed(unit.ofKelvin(kelvin), decimals) + " " + unit.symbol();
+    }
+
+    /**
+     * Prints a pressure with its datum as plans write it, so that it can be read back.
+     *
+     * @param pascal a pressure counted from the datum
+     * @param unit the unit to print
+     * @param datum what the pressure is counted from
+     * @param decimals 0 to 12
+     * @return such as "2.05 bar(a)"
+     */
+    public static String pressure(double pascal, PressureUnit unit, Datum datum, int decimals) {
+        return fixed(unit.ofPascal(pascal), decimals) + " " + unit.symbol() + "(" + datum.mark() + ")";
+    }
+
+    /**
      * Prints a duration.
      *
      * @param seconds zero or more

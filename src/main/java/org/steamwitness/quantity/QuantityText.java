@@ -1,36 +1,34 @@
 package org.steamwitness.quantity;
 
-import java.util.Arrays;
-import java.util.Map;
-import java.util.TreeMap;
-import java.util.function.Function;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
-import java.util.stream.Collectors;
+import java.util.List;
 
 /**
- * Quantities as plans and run sheets write them: a number, a space, a unit, and for pressures the datum in brackets,
- * such as {@code 121.1 degC}, {@code 0.25 K}, {@code 15 min}, {@code 3.0 bar(g)}, {@code 205 kPa(a)}. The decimal
- * mark is a full stop, whatever the machine's locale.
+ * Temperatures, pressures and times as plans and run sheets write them: a number, a space, a unit, and for pressures
+ * the datum in brackets, such as {@code 121.1 degC}, {@code 0.25 K}, {@code 15 min}, {@code 3.0 bar(g)},
+ * {@code 205 kPa(a)}. The decimal mark is a full stop, whatever the machine's locale. A text converts by the same
+ * arithmetic as a logged column, so that a sample of 121.1 and a limit of {@code 121.1 degC} are equal to the last bit.
+ *
+ * @see AmountText
+ * @see RateText
  */
 public final class QuantityText {
 
-    private static final Pattern SHAPE = Pattern.compile(
-            "(?<number>[+-]?[0-9]{1,15}(?:\\.[0-9]{1,15})?) ?(?<unit>[A-Za-z][A-Za-z0-9/]*)(?:\\((?<datum>[ag])\\))?");
+    private static final double LOWEST_ATMOSPHERE = 30e3;
+    private static final double HIGHEST_ATMOSPHERE = 120e3;
 
-    private static final Map<String, Double> SECONDS = Map.of("s", 1.0, "min", 60.0, "h", 3600.0);
+    private static final Wording TEMPERATURE = new Wording("a temperature such as 121.1 degC", Scale.temperatures());
+    private static final Wording STEP =
+            new Wording("a temperature difference such as 0.25 K", Scale.temperatureSteps());
+    private static final Wording DURATION =
+            new Wording("a duration such as 15 min", List.of(Scale.SECOND, Scale.MINUTE, Scale.HOUR));
+    private static final Wording PRESSURE =
+            new Wording("a pressure with its datum such as 205 kPa(a) or 1.04 bar(g)", Scale.pressures());
+    private static final Wording ATMOSPHERE =
+            new Wording("the pressure of the atmosphere such as 1008 hPa", Scale.pressures());
+    private static final Wording PRESSURE_DIFFERENCE =
+            new Wording("a pressure difference such as 0.02 bar", Scale.pressures());
 
-    private final String text;
-    private final double number;
-    private final String unit;
-    private final String datum;
-
-    private QuantityText(String text, double number, String unit, String datum) {
-        this.text = text;
-        this.number = number;
-        this.unit = unit;
-        this.datum = datum;
-    }
+    private QuantityText() {}
 
     /**
      * Reads a temperature.
@@ -40,28 +38,23 @@ public final class QuantityText {
      * @throws QuantityException if it is not one
      */
     public static double kelvin(String text) {
-        QuantityText written = of(text, "a temperature such as 121.1 degC");
-        written.refuseDatum("a temperature such as 121.1 degC");
-        double kelvin = written.unitAmong(bySymbol(TemperatureUnit.values(), TemperatureUnit::symbol))
-                .toKelvin(written.number);
+        double kelvin = TEMPERATURE.read(text);
         if (kelvin <= 0) {
-            throw new QuantityException("\"" + text + "\" lies at or below absolute zero");
+            throw TEMPERATURE.refusal(text, " lies at or below absolute zero");
         }
         return kelvin;
     }
 
     /**
-     * Reads a difference of temperatures.
+     * Reads a difference of temperatures, of either sign.
      *
-     * @param text such as "0.25 K"; degC and degF are refused, since they would be taken for temperatures
+     * @param text such as "0.25 K"; degC and degF are refused, since they would be taken for temperatures, and the
+     *     message gives the kelvin
      * @return kelvin
      * @throws QuantityException if it is not one
      */
     public static double kelvinDifference(String text) {
-        QuantityText written = of(text, "a temperature difference such as 0.25 K");
-        written.refuseDatum("a temperature difference such as 0.25 K");
-        return written.unitAmong(Map.of(TemperatureUnit.KELVIN.symbol(), TemperatureUnit.KELVIN))
-                .differenceToKelvin(written.number);
+        return StepInKelvin.read(STEP, text);
     }
 
     /**
@@ -72,31 +65,31 @@ public final class QuantityText {
      * @throws QuantityException if it is not one
      */
     public static double seconds(String text) {
-        QuantityText written = of(text, "a duration such as 15 min");
-        written.refuseDatum("a duration such as 15 min");
-        double seconds = written.number * written.unitAmong(SECONDS);
-        if (seconds < 0) {
-            throw new QuantityException("\"" + text + "\" is negative; expected a duration such as 15 min");
-        }
-        return seconds;
+        return DURATION.readZeroOrMore(text);
     }
 
     /**
-     * Reads a pressure with its datum.
+     * Reads a pressure with its datum. A gauge reading below zero is a vacuum.
      *
-     * @param text such as "3.0 bar(g)" or "205 kPa(a)"; a pressure without datum is refused
-     * @return the pressure and its datum
+     * @param text such as "3.0 bar(g)", "205 kPa(a)" or "-0.9 bar(g)"; a pressure without datum is refused
+     * @return the pressure and its datum, not below vacuum
      * @throws QuantityException if it is not one
      */
     public static PressureReading pressure(String text) {
-        QuantityText written = of(text, "a pressure with its datum such as 205 kPa(a) or 1.04 bar(g)");
-        double pascal = written.unitAmong(bySymbol(PressureUnit.values(), PressureUnit::symbol))
-                .toPascal(written.number);
-        if (written.datum == null) {
-            throw new QuantityException("\"" + text + "\" does not say what it is counted from; write " + text
-                    + "(a) for absolute or " + text + "(g) for gauge");
+        Wording.Written written = PRESSURE.apart(text);
+        refuseTradeSpelling(text, written.unit());
+        double pascal = PRESSURE.toSi(text, written);
+        Datum datum = written.datum()
+                .orElseThrow(() -> new QuantityException("\"" + text
+                        + "\" does not say what it is counted from; write " + text + "(a) for absolute or " + text
+                        + "(g) for gauge"));
+        if (datum == Datum.ABSOLUTE && pascal < 0) {
+            throw PRESSURE.refusal(text, " lies below vacuum; only a gauge pressure, (g), may be negative");
         }
-        return new PressureReading(pascal, written.datum.equals("g") ? Datum.GAUGE : Datum.ABSOLUTE);
+        if (datum == Datum.GAUGE && pascal < -HIGHEST_ATMOSPHERE) {
+            throw PRESSURE.refusal(text, " lies below vacuum under any atmosphere");
+        }
+        return new PressureReading(pascal, datum);
     }
 
     /**
@@ -107,14 +100,13 @@ public final class QuantityText {
      * @throws QuantityException if it is not one
      */
     public static double atmospherePascal(String text) {
-        QuantityText written = of(text, "the pressure of the atmosphere such as 1008 hPa");
-        double pascal = written.unitAmong(bySymbol(PressureUnit.values(), PressureUnit::symbol))
-                .toPascal(written.number);
-        if ("g".equals(written.datum)) {
+        Wording.Written written = ATMOSPHERE.apart(text);
+        double pascal = ATMOSPHERE.toSi(text, written);
+        if (written.datum().filter(Datum.GAUGE::equals).isPresent()) {
             throw new QuantityException(
                     "\"" + text + "\" is a gauge pressure; the atmosphere is absolute, as 1008 hPa");
         }
-        if (!(pascal >= 30e3 && pascal <= 120e3)) {
+        if (!(pascal >= LOWEST_ATMOSPHERE && pascal <= HIGHEST_ATMOSPHERE)) {
             throw new QuantityException("\"" + text
                     + "\" is no pressure of an atmosphere; expected 300 hPa to 1200 hPa, read at the place of the"
                     + " chamber and not reduced to sea level");
@@ -123,44 +115,24 @@ public final class QuantityText {
     }
 
     /**
-     * Reads a difference of pressures, which has no datum.
+     * Reads a difference of pressures, of either sign, which has no datum.
      *
      * @param text such as "0.02 bar"
      * @return pascal
      * @throws QuantityException if it is not one
      */
     public static double pascalDifference(String text) {
-        QuantityText written = of(text, "a pressure difference such as 0.02 bar");
-        written.refuseDatum("a pressure difference such as 0.02 bar");
-        return written.unitAmong(bySymbol(PressureUnit.values(), PressureUnit::symbol))
-                .toPascal(written.number);
+        return PRESSURE_DIFFERENCE.read(text);
     }
 
-    private static QuantityText of(String text, String expected) {
-        Matcher shape = SHAPE.matcher(text);
-        if (!shape.matches()) {
-            throw new QuantityException("\"" + text + "\" is not " + expected);
+    /** The trade also writes psig, psia, barg and bara; they are answered with the spelling that is read. */
+    private static void refuseTradeSpelling(String text, String unit) {
+        String stem = unit.substring(0, unit.length() - 1);
+        String last = unit.substring(unit.length() - 1);
+        if ((last.equals("a") || last.equals("g"))
+                && PRESSURE.scale(unit).isEmpty()
+                && PRESSURE.scale(stem).isPresent()) {
+            throw PRESSURE.refusal(text, ": unknown unit " + unit + ", write " + stem + "(" + last + ")");
         }
-        return new QuantityText(
-                text, Double.parseDouble(shape.group("number")), shape.group("unit"), shape.group("datum"));
-    }
-
-    private void refuseDatum(String expected) {
-        if (datum != null) {
-            throw new QuantityException("\"" + text + "\" is not " + expected);
-        }
-    }
-
-    private <U> U unitAmong(Map<String, U> units) {
-        U known = units.get(unit);
-        if (known == null) {
-            throw new QuantityException("\"" + text + "\": unknown unit " + unit + "; known here: "
-                    + String.join(", ", new TreeMap<>(units).keySet()));
-        }
-        return known;
-    }
-
-    private static <U> Map<String, U> bySymbol(U[] units, Function<U, String> symbol) {
-        return Arrays.stream(units).collect(Collectors.toMap(symbol, Function.identity()));
     }
 }

@@ -43,7 +43,8 @@ class GuidesTest {
 
     @Test
     void theMistakeThatTheReadmeQuotesReadsSo() throws IOException {
-        String quoted = "R2-0314.plan.yaml:29:13: hold.duration: \"42\" is not a duration such as 15 min";
+        String quoted = "R2-0314.plan.yaml:29:13: hold.duration: \"42\" is not a duration such as 15 min;"
+                + " known units: s, min, h";
         assertThat(Files.readString(Path.of("README.md"))).contains("`" + quoted + "`");
         Path plan = folder.resolve("R2-0314.plan.yaml");
         Files.writeString(

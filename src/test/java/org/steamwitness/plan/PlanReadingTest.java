@@ -56,18 +56,18 @@ class PlanReadingTest {
             revision: 3              | revision: 0              | p.yaml:5:11: revision: "0" is not a whole number from 1 to 9999
             status: in-force         | status: released         | p.yaml:6:9: status: "released" is not one of: draft, in-force
             process: retort          | process:                 | p.yaml:9:9: process: is empty; expected one of: retort
-            121.1 degC               | 121,1 degC               | p.yaml:26:13: hold.at-least: "121,1 degC" is not a temperature such as 121.1 degC
-            42 min                   | 42                       | p.yaml:29:13: hold.duration: "42" is not a duration such as 15 min
+            121.1 degC               | 121,1 degC               | p.yaml:26:13: hold.at-least: "121,1 degC" is not a temperature such as 121.1 degC; known units: degC, degF, K
+            42 min                   | 42                       | p.yaml:29:13: hold.duration: "42" is not a duration such as 15 min; known units: s, min, h
             at-most: 124.1 degC      | at-most: 120.0 degC      | p.yaml:26:3: hold: at-least must lie below at-most
             channels: [chamber, drain] | channels: [chamber, dran] | p.yaml:25:1: hold: starts.channels names "dran", which is not among the channels
             datum: gauge             | datum: gage              | p.yaml:19:90: channels[3].datum: "gage" is not one of: absolute, gauge
             datum: gauge,            | ''                       | p.yaml:19:5: channels[3].datum: required key is missing
-            unit: bar,               | unit: Bar,               | p.yaml:19:78: channels[3].unit: "Bar" is not one of: Pa, hPa, kPa, MPa, bar, mbar, psi, kgf/cm2
-            {calibration: 0.02 bar   | {calibration: 0.02 bar(g) | p.yaml:20:33: channels[3].uncertainty.calibration: "0.02 bar(g)" is not a pressure difference such as 0.02 bar
+            unit: bar,               | unit: Bar,               | p.yaml:19:78: channels[3].unit: "Bar" is not one of: Pa, hPa, kPa, MPa, bar, mbar, psi, kgf/cm2, atm, mmHg, inHg
+            {calibration: 0.02 bar   | {calibration: 0.02 bar(g) | p.yaml:20:33: channels[3].uncertainty.calibration: "0.02 bar(g)" is not a pressure difference such as 0.02 bar; known units: Pa, hPa, kPa, MPa, bar, mbar, psi, kgf/cm2, atm, mmHg, inHg
             name: drain              | name: chamber            | p.yaml:12:1: channels: two channels are named "chamber"
             air: 1.0 K               | air: 0 K                 | p.yaml:32:13: saturation: the tolerances air and superheat must exceed zero
             conformance: 95 %        | conformance: 50 %        | p.yaml:35:40: decision.conformance: "50 %" is too low; expected more than 50 % and less than 100 %
-            floor: none              | floor: nothing           | p.yaml:34:56: lethality[0].floor: "nothing" is not a temperature such as 121.1 degC
+            floor: none              | floor: nothing           | p.yaml:34:56: lethality[0].floor: "nothing" is not a temperature such as 121.1 degC; known units: degC, degF, K
             required: [zone          | required: [zon           | p.yaml:36:24: run-sheet.required[0]: "zon" is no run sheet entry; known: *
             id: R2-stew-73x111       | id: [R2]                 | p.yaml:3:5: id: expected text
             revision: 3              | 'revision: 3\\nrevision: 4' | p.yaml:6:1: revision: stands twice; a key may stand once
@@ -90,8 +90,9 @@ class PlanReadingTest {
         assertThat(messages(plan(text).problems()))
                 .containsExactly(
                         "p.yaml:5:11: revision: \"x\" is not a whole number from 1 to 9999",
-                        "p.yaml:29:13: hold.duration: \"long\" is not a duration such as 15 min",
-                        "p.yaml:32:37: saturation.superheat: \"2.0 degC\": unknown unit degC; known here: K");
+                        "p.yaml:29:13: hold.duration: \"long\" is not a duration such as 15 min; known units: s, min, h",
+                        "p.yaml:32:37: saturation.superheat: \"2.0 degC\": a difference of temperatures is written in"
+                                + " kelvin, here 2 K; expected a temperature difference such as 0.25 K; known units: K");
     }
 
     @Test
