@@ -27,6 +27,7 @@ import org.jfree.chart.ui.TextAnchor;
 import org.steamwitness.evaluate.Evaluation;
 import org.steamwitness.evaluate.phase.Phase;
 import org.steamwitness.evaluate.phase.PhaseName;
+import org.steamwitness.evaluate.saturation.Departure;
 import org.steamwitness.plan.BoundChannel;
 import org.steamwitness.plan.BoundPlan;
 import org.steamwitness.quantity.TemperatureUnit;
@@ -143,16 +144,12 @@ public final class RunChart {
             plot.addRangeMarker(line(tolerance.superheatKelvin()));
         });
         int index = 0;
-        for (BoundChannel channel : plan.channels()) {
-            if (channel.inSteam()) {
-                Column departure = evaluation.saturation().departureKelvin(channel);
-                int style = index;
-                plot.setDataset(index, Thinned.of(channel.name(), start, trace.seconds(), departure));
-                XYLineAndShapeRenderer renderer = renderer(COLOURS.get(style % COLOURS.size()), stroke(1f, style));
-                renderer.setDefaultSeriesVisibleInLegend(false);
-                plot.setRenderer(index, renderer);
-                index++;
-            }
+        for (Departure departure : evaluation.saturation().departures()) {
+            plot.setDataset(index, Thinned.of(departure.channel().name(), start, trace.seconds(), departure.kelvin()));
+            XYLineAndShapeRenderer renderer = renderer(COLOURS.get(index % COLOURS.size()), stroke(1f, index));
+            renderer.setDefaultSeriesVisibleInLegend(false);
+            plot.setRenderer(index, renderer);
+            index++;
         }
         return plot;
     }

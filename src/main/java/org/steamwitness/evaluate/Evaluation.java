@@ -39,7 +39,7 @@ public record Evaluation(
         List<Finding> findings) {
 
     /** Rises whenever a result of an unchanged log, plan and run sheet changes. */
-    public static final int NUMBER = 1;
+    public static final int NUMBER = 2;
 
     /**
      * Evaluates a run.

@@ -45,6 +45,7 @@ final class Binding {
                 plan.lethality(),
                 plan.decision(),
                 plan.longestGapSeconds(),
+                plan.scanDelaySeconds(),
                 marks(),
                 plan.status() == PlanStatus.DRAFT,
                 plan.basis());
@@ -97,6 +98,7 @@ final class Binding {
                     planned.place(),
                     planned.contact(),
                     read.absolute(sheet.atmospherePascal().orElse(Double.NaN)),
+                    planned.lag().orElse(PlannedChannel.Lag.NONE),
                     planned.uncertainty()
                             .map(PlannedChannel.StatedUncertainty::standard)
                             .map(OptionalDouble::of)

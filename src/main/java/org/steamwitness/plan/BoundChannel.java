@@ -13,10 +13,17 @@ import org.steamwitness.trace.QuantityKind;
  * @param place where its sensor sits
  * @param contact what touches the sensor
  * @param values samples in kelvin or absolute pascal, NaN where missing
+ * @param lag the sensor's lag, as stated
  * @param commonUncertainty standard uncertainty that all samples share, in kelvin or pascal; empty if not stated
  */
 public record BoundChannel(
-        String name, QuantityKind kind, Place place, Contact contact, Column values, OptionalDouble commonUncertainty) {
+        String name,
+        QuantityKind kind,
+        Place place,
+        Contact contact,
+        Column values,
+        PlannedChannel.Lag lag,
+        OptionalDouble commonUncertainty) {
 
     /**
      * Tells whether the sensor stands in the chamber's steam, so that saturation applies to it.

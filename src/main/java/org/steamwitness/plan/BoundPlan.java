@@ -16,6 +16,7 @@ import org.steamwitness.trace.Trace;
  * @param lethality lethality aims
  * @param decision how values are held against limits
  * @param longestGapSeconds longest time between two samples that a line may bridge
+ * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
  * @param marks instants entered by hand
  * @param draft whether the plan is not in force
  * @param source where the limits come from
@@ -28,6 +29,7 @@ public record BoundPlan(
         List<LethalityAim> lethality,
         DecisionRule decision,
         double longestGapSeconds,
+        double scanDelaySeconds,
         Marks marks,
         boolean draft,
         Plan.Basis source) {

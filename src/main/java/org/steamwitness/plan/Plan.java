@@ -19,6 +19,7 @@ import org.steamwitness.trace.ReadingRules;
  * @param channels the channels it needs, in its own order
  * @param hold the hold it asks for
  * @param longestGapSeconds longest time between two samples that a line may bridge
+ * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
  * @param saturation how far from saturation a probe may stand in the hold phase
  * @param lethality what it asks of product probes; may be empty
  * @param decision how values are held against limits
@@ -36,6 +37,7 @@ public record Plan(
         List<PlannedChannel> channels,
         Hold hold,
         double longestGapSeconds,
+        double scanDelaySeconds,
         Optional<SaturationTolerance> saturation,
         List<LethalityAim> lethality,
         DecisionRule decision,

@@ -22,6 +22,9 @@ final class PlanReader {
     private static final double DEFAULT_LONGEST_GAP_SECONDS = 10;
     private static final double DEFAULT_SHORTEST_SECONDS = 10;
 
+    /** Uncertainties without a coverage factor of their own are expanded by two; common practice, no source. */
+    private static final double EXPANDED = 2;
+
     private PlanReader() {}
 
     static Plan plan(Section at) {
@@ -38,6 +41,7 @@ final class PlanReader {
         Entry<List<PlannedChannel>> channels = at.need("channels").list(slot -> slot.section(PlanReader::channel));
         Entry<Hold> hold = at.need("hold").section(PlanReader::hold);
         Entry<Double> longestGap = at.may("longest-gap").parsed("a duration such as 10 s", QuantityText::seconds);
+        Entry<Double> scanDelay = at.may("scan-delay").parsed("a duration such as 2 s", QuantityText::seconds);
         Entry<SaturationTolerance> saturation = at.may("saturation").section(PlanReader::saturation);
         Entry<List<LethalityAim>> lethality = at.may("lethality").list(slot -> slot.section(PlanReader::lethality));
         Entry<DecisionRule> decision = at.need("decision").section(PlanReader::decision);
@@ -56,6 +60,7 @@ final class PlanReader {
                 channels.get(),
                 hold.get(),
                 longestGap.or(DEFAULT_LONGEST_GAP_SECONDS),
+                scanDelay.or(0.0),
                 saturation.optional(),
                 lethality.or(List.of()),
                 decision.get(),
@@ -87,6 +92,8 @@ final class PlanReader {
                 pressure ? QuantityText::pascalDifference : QuantityText::kelvinDifference;
         Entry<PlannedChannel.StatedUncertainty> uncertainty =
                 at.may("uncertainty").section(section -> uncertainty(section, difference));
+        Entry<PlannedChannel.Lag> lag =
+                pressure ? Entry.absent() : at.may("lag").section(PlanReader::lag);
         Place where = place.get();
         kind.get();
         return new PlannedChannel(
@@ -94,6 +101,7 @@ final class PlanReader {
                 where,
                 contact.or(where.steamContact() ? Contact.STEAM : Contact.SEALED),
                 uncertainty.optional(),
+                lag.optional(),
                 certificate.optional(),
                 due.optional());
     }
@@ -142,6 +150,12 @@ final class PlanReader {
         Entry<Double> drift = at.may("drift").parsed("a quantity such as 0.1 K", difference);
         Entry<Double> coverage = at.need("coverage").parsed("a number such as 2", PlanReader::coverage);
         return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), coverage.get());
+    }
+
+    private static PlannedChannel.Lag lag(Section at) {
+        Entry<Double> value = at.need("value").parsed("a duration such as 6 s", QuantityText::seconds);
+        Entry<Double> uncertainty = at.need("uncertainty").parsed("a duration such as 2 s", QuantityText::seconds);
+        return new PlannedChannel.Lag(value.get(), uncertainty.get() / EXPANDED);
     }
 
     private static double coverage(String text) {

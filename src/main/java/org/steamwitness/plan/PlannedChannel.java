@@ -12,6 +12,7 @@ import org.steamwitness.trace.ReadingRules.ColumnRule;
  * @param place where its sensor sits
  * @param contact what touches the sensor
  * @param uncertainty what the plan states of its uncertainty
+ * @param lag what the plan states of the sensor's lag
  * @param certificate the calibration certificate
  * @param due when the next calibration is due
  */
@@ -20,6 +21,7 @@ public record PlannedChannel(
         Place place,
         Contact contact,
         Optional<StatedUncertainty> uncertainty,
+        Optional<Lag> lag,
         Optional<String> certificate,
         Optional<LocalDate> due) {
 
@@ -49,5 +51,17 @@ public record PlannedChannel(
         public double standard() {
             return Math.sqrt(calibration * calibration + drift * drift) / coverage;
         }
+    }
+
+    /**
+     * The lag of a sensor that follows with one time constant.
+     *
+     * @param seconds the time constant, zero or more
+     * @param uncertaintySeconds its standard uncertainty, zero or more
+     */
+    public record Lag(double seconds, double uncertaintySeconds) {
+
+        /** No lag is stated. */
+        public static final Lag NONE = new Lag(0, 0);
     }
 }

@@ -47,7 +47,9 @@ final class ChannelParts {
                 Given.numberOr(
                         scaled(measure.map(ChannelMeasure::resolution).orElse(OptionalDouble.empty()), perUnit),
                         "no step was seen often enough"),
-                Given.withheld(NOT_EVALUATED),
+                Given.numberOr(
+                        scaled(measure.map(ChannelMeasure::noise).orElse(OptionalDouble.empty()), perUnit),
+                        "too few samples at an even interval"),
                 planned.uncertainty()
                         .map(u -> Given.ofNumber(u.standard() * perUnit))
                         .orElseGet(() -> Given.withheld("not stated", "plan: channels.uncertainty")),

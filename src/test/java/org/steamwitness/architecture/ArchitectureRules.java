@@ -33,14 +33,15 @@ final class ArchitectureRules {
 
     /** What each question of the evaluation may see of the others. Only the list of steps above them sees them all. */
     private static final Map<String, List<String>> QUESTIONS = table("""
-            instruments ->
-            phase       -> instruments
-            saturation  -> instruments phase
-            hold        -> instruments phase
-            lethality   -> instruments phase
-            energy      -> instruments phase
-            leak        -> instruments phase
-            criteria    -> instruments phase saturation hold lethality energy leak
+            uncertainty ->
+            instruments -> uncertainty
+            phase       -> uncertainty instruments
+            saturation  -> uncertainty instruments phase
+            hold        -> uncertainty instruments phase
+            lethality   -> uncertainty instruments phase
+            energy      -> uncertainty instruments phase
+            leak        -> uncertainty instruments phase
+            criteria    -> uncertainty instruments phase saturation hold lethality energy leak
             """);
 
     private ArchitectureRules() {}

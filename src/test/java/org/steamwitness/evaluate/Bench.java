@@ -13,6 +13,7 @@ import org.steamwitness.plan.Hold;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.plan.Marks;
 import org.steamwitness.plan.Plan;
+import org.steamwitness.plan.PlannedChannel;
 import org.steamwitness.plan.SaturationTolerance;
 import org.steamwitness.trace.Column;
 import org.steamwitness.trace.LogClock;
@@ -27,6 +28,7 @@ public final class Bench {
     private List<BoundChannel> channels = List.of();
     private Hold hold = new Hold(121.1 + 273.15, 124.1 + 273.15, Optional.empty(), 60, List.of("chamber"));
     private List<LethalityAim> lethality = List.of();
+    private double scanDelay;
     private DecisionRule decision = new DecisionRule(true, 0.95);
     private Marks marks = new Marks(OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
 
@@ -53,6 +55,7 @@ public final class Bench {
                 place,
                 place.steamContact() ? Contact.STEAM : Contact.SEALED,
                 Column.of(Arrays.stream(celsius).map(c -> c + 273.15).toArray()),
+                PlannedChannel.Lag.NONE,
                 OptionalDouble.of(common));
     }
 
@@ -63,6 +66,7 @@ public final class Bench {
                 Place.CHAMBER,
                 Contact.STEAM,
                 Column.of(Arrays.stream(kilopascal).map(p -> p * 1000).toArray()),
+                PlannedChannel.Lag.NONE,
                 OptionalDouble.of(commonKilopascal * 1000));
     }
 
@@ -79,6 +83,23 @@ public final class Bench {
 
     public Bench aiming(LethalityAim... aims) {
         lethality = List.of(aims);
+        return this;
+    }
+
+    /** The same channel with a stated lag. */
+    public static BoundChannel lagging(BoundChannel channel, double seconds, double uncertaintySeconds) {
+        return new BoundChannel(
+                channel.name(),
+                channel.kind(),
+                channel.place(),
+                channel.contact(),
+                channel.values(),
+                new PlannedChannel.Lag(seconds, uncertaintySeconds),
+                channel.commonUncertainty());
+    }
+
+    public Bench scanning(double delaySeconds) {
+        scanDelay = delaySeconds;
         return this;
     }
 
@@ -108,6 +129,7 @@ public final class Bench {
                 lethality,
                 decision,
                 10,
+                scanDelay,
                 marks,
                 false,
                 new Plan.Basis("SP-1", "1", "process authority", "2026-01-01"));

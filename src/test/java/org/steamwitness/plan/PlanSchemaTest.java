@@ -30,6 +30,19 @@ class PlanSchemaTest {
         assertThat(SHEET.validate(tree(sample("R2-0314.run.yaml")))).isEmpty();
     }
 
+    @Test
+    void lagAndScanDelayKeepTheShape() throws IOException {
+        String text = sample("R2-0314.plan.yaml")
+                .replace("longest-gap: 10 s", "longest-gap: 10 s\nscan-delay: 2 s")
+                .replace("place: drain, ", "place: drain, lag: {value: 6 s, uncertainty: 2 s}, ");
+        Plan plan = Plan.read("p.yaml", text.getBytes(StandardCharsets.UTF_8))
+                .value()
+                .orElseThrow();
+        assertThat(plan.channels().get(1).lag()).contains(new PlannedChannel.Lag(6, 1));
+        assertThat(plan.scanDelaySeconds()).isEqualTo(2);
+        assertThat(PLAN.validate(tree(text))).isEmpty();
+    }
+
     @ParameterizedTest
     @CsvSource(delimiter = '|', textBlock = """
             plan-format: 1         | plan-format: 2
@@ -56,6 +69,9 @@ class PlanSchemaTest {
             calibration: 0.02 bar  | calibration: 0.02 K
             calibration: 0.2 K     | calibration: 0.2 degC
             due: 2027-01-15        | due: 15.01.2027
+            longest-gap: 10 s      | 'longest-gap: 10 s\nscan-delay: 2'
+            'unit: degC,\n     uncertainty' | 'unit: degC, lag: {value: 6 s},\n     uncertainty'
+            'unit: bar, '          | 'unit: bar, lag: {value: 6 s, uncertainty: 2 s}, '
             air: 1.0 K             | air: 1.0 degC
             {when: all,            | {when: any,
             conformance: 95 %      | conformance: 0.95
@@ -68,7 +84,7 @@ class PlanSchemaTest {
             id: R2-stew-73x111     | id: [R2]
             """)
     void refusesBrokenPlansAsTheProgramDoes(String from, String to) throws IOException {
-        String text = sample("R2-0314.plan.yaml").replace(from, to);
+        String text = sample("R2-0314.plan.yaml").replace(from.replace("\\n", "\n"), to.replace("\\n", "\n"));
         assertThat(text).isNotEqualTo(sample("R2-0314.plan.yaml"));
         assertThat(Plan.read("p.yaml", text.getBytes(StandardCharsets.UTF_8)).problems())
                 .isNotEmpty();

@@ -20,7 +20,7 @@ import tools.jackson.databind.json.JsonMapper;
 class RecordJsonTest {
 
     private static final double FROZEN_LETHALITY = 11.1312627009;
-    private static final double FROZEN_SMALLEST_AIR = 0.0412796079746;
+    private static final double FROZEN_SMALLEST_AIR = 0.041449744192;
 
     @Test
     void writesWithheldValuesAsObjectsAndNeverNull() throws IOException {
@@ -70,14 +70,14 @@ class RecordJsonTest {
     }
 
     /**
-     * Our own results for the sample run under evaluation rules 1. A change here needs a decision, a line in the
+     * Our own results for the sample run under evaluation rules 2. A change here needs a decision, a line in the
      * change log and a higher evaluation number.
      */
     @Tag("frozen")
     @Test
     void keepsTheResultsOfTheSampleUnderItsEvaluationNumber() throws IOException {
         CycleRecord record = Samples.saturatedSteam().record();
-        assertThat(Evaluation.NUMBER).isEqualTo(1);
+        assertThat(Evaluation.NUMBER).isEqualTo(2);
         assertThat(record.hold().steps().get(0).provenSeconds()).isEqualTo(2745);
         assertThat(record.lethality().get(0).governing().value().orElseThrow().value())
                 .isCloseTo(FROZEN_LETHALITY, within(1e-9));

@@ -34,8 +34,9 @@ public record Instruments(List<ChannelMeasure> channels, List<Finding> findings)
      * @return measures and findings
      */
     public static Instruments of(Trace trace, BoundPlan plan) {
-        List<ChannelMeasure> channels =
-                plan.channels().stream().map(ChannelMeasure::of).toList();
+        List<ChannelMeasure> channels = plan.channels().stream()
+                .map(c -> ChannelMeasure.of(trace.seconds(), c))
+                .toList();
         List<Finding> findings = new ArrayList<>(gaps(trace, plan.longestGapSeconds()));
         channels.stream()
                 .filter(Instruments::standsStill)

@@ -21,6 +21,7 @@ import org.steamwitness.trace.Trace;
  * @param notJudged why saturation could not be judged; empty if it was
  * @param tolerance the plan's tolerances
  * @param saturationKelvin saturation temperature of the measured pressure, one value a sample; NaN where unknown
+ * @param departures one entry a steam-contact probe, sample by sample; empty if saturation was not judged
  * @param perPhase what each probe showed in each phase
  * @param episodes in the hold phase, in the order of probes
  */
@@ -28,6 +29,7 @@ public record SaturationCheck(
         Optional<String> notJudged,
         Optional<SaturationTolerance> tolerance,
         Column saturationKelvin,
+        List<Departure> departures,
         List<PhaseDeparture> perPhase,
         List<Episode> episodes) {
 
@@ -43,16 +45,21 @@ public record SaturationCheck(
      */
     public static SaturationCheck of(Trace trace, BoundPlan plan, Instruments instruments, Phases phases, double z) {
         Optional<BoundChannel> pressure = plan.pressure();
-        Column saturation = pressure.map(p -> saturationOf(p.values())).orElseGet(() -> unknown(trace.size()));
+        SaturationColumns saturation =
+                SaturationColumns.of(pressure.map(BoundChannel::values).orElseGet(() -> unknown(trace.size())));
         Optional<String> obstacle = obstacle(plan, phases);
         if (obstacle.isPresent()) {
-            return new SaturationCheck(obstacle, plan.saturation(), saturation, List.of(), List.of());
+            return new SaturationCheck(
+                    obstacle, plan.saturation(), saturation.kelvin(), List.of(), List.of(), List.of());
         }
         SaturationTolerance tolerance = plan.saturation().orElseThrow();
         List<PhaseDeparture> perPhase = new ArrayList<>();
+        List<Departure> departures = new ArrayList<>();
         List<Episode> episodes = new ArrayList<>();
         for (BoundChannel probe : plan.inSteam()) {
-            Departure departure = new Departure(instruments.of(probe), instruments.of(pressure.orElseThrow()));
+            Departure departure = new Departure(
+                    instruments.of(probe), instruments.of(pressure.orElseThrow()), saturation, trace.seconds(), plan);
+            departures.add(departure);
             SampleStates states = new SampleStates(departure, tolerance, z);
             for (Phase phase : phases.phases()) {
                 perPhase.add(PhaseDeparture.of(departure, phase, states, tolerance.airKelvin(), z));
@@ -61,7 +68,12 @@ public record SaturationCheck(
             phases.hold().ifPresent(hold -> episodes.addAll(finder.between(hold.from(), hold.end())));
         }
         return new SaturationCheck(
-                Optional.empty(), plan.saturation(), saturation, List.copyOf(perPhase), List.copyOf(episodes));
+                Optional.empty(),
+                plan.saturation(),
+                saturation.kelvin(),
+                List.copyOf(departures),
+                List.copyOf(perPhase),
+                List.copyOf(episodes));
     }
 
     /**
@@ -88,27 +100,6 @@ public record SaturationCheck(
                 .max();
     }
 
-    /**
-     * Departure of a probe from saturation, one value a sample.
-     *
-     * @param probe a steam-contact channel
-     * @return kelvin; NaN where it is not known
-     */
-    public Column departureKelvin(BoundChannel probe) {
-        Column saturation = saturationKelvin;
-        return new Column() {
-            @Override
-            public int size() {
-                return saturation.size();
-            }
-
-            @Override
-            public double at(int index) {
-                return probe.values().at(index) - saturation.at(index);
-            }
-        };
-    }
-
     private static Optional<String> obstacle(BoundPlan plan, Phases phases) {
         if (plan.saturation().isEmpty()) {
             return Optional.of("the medium holds air on purpose");
@@ -120,20 +111,6 @@ public record SaturationCheck(
             return Optional.of("no temperature channel stands in the chamber's steam");
         }
         return phases.hold().isEmpty() ? Optional.of("no hold phase was reached") : Optional.empty();
-    }
-
-    private static Column saturationOf(Column pascal) {
-        return new Column() {
-            @Override
-            public int size() {
-                return pascal.size();
-            }
-
-            @Override
-            public double at(int index) {
-                return Departure.saturationKelvin(pascal, index);
-            }
-        };
     }
 
     private static Column unknown(int size) {

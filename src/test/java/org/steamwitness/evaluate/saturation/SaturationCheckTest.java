@@ -126,7 +126,11 @@ class SaturationCheckTest {
                         Bench.pressure(uKilopascal, kilopascal));
         Instruments instruments = Instruments.of(bench.trace(), bench.plan());
         return new Departure(
-                instruments.channels().get(0), instruments.channels().get(1));
+                instruments.channels().get(0),
+                instruments.channels().get(1),
+                SaturationColumns.of(instruments.channels().get(1).channel().values()),
+                bench.trace().seconds(),
+                bench.plan());
     }
 
     private static SaturationCheck check(double[] celsius, double uKelvin, double uKilopascal) {
