@@ -116,10 +116,14 @@ final class TerminalPage {
     }
 
     private void lethality(LethalityPart part) {
+        String minimum = part.minimum()
+                .value()
+                .map(m -> ", minimum " + Printed.fixed(m, 2) + " " + part.unit())
+                .orElse("");
         lines.add(padded("Least " + part.name(), 13)
                 + part.governing()
-                        .printed(g -> Printed.fixed(g.value(), 2) + " min at " + g.channel() + " (" + part.counted()
-                                + ", minimum " + Printed.fixed(part.minimum(), 2) + " min)"));
+                        .printed(g -> Printed.fixed(g.value(), 2) + " " + part.unit() + " at " + g.channel() + " ("
+                                + part.counted() + minimum + ")"));
     }
 
     private void findings() {

@@ -39,7 +39,7 @@ public record Evaluation(
         List<Finding> findings) {
 
     /** Rises whenever a result of an unchanged log, plan and run sheet changes. */
-    public static final int NUMBER = 2;
+    public static final int NUMBER = 3;
 
     /**
      * Evaluates a run.
@@ -55,8 +55,8 @@ public record Evaluation(
         Instruments instruments = Instruments.of(trace, plan);
         Phases phases = Phases.of(trace, plan);
         SaturationCheck saturation = SaturationCheck.of(trace, plan, instruments, phases, z);
-        HoldResult hold = HoldResult.of(trace, plan, phases);
-        List<Lethality> lethality = Lethality.of(trace, plan, phases, z);
+        HoldResult hold = HoldResult.of(trace, plan, instruments, phases);
+        List<Lethality> lethality = Lethality.of(trace, plan, phases, saturation::outsideAt, z);
         List<Criterion> criteria = Criteria.of(plan, phases, hold, saturation, lethality);
         List<Finding> findings = new ArrayList<>(known);
         findings.addAll(instruments.findings());

@@ -102,7 +102,10 @@ final class Binding {
                     planned.uncertainty()
                             .map(PlannedChannel.StatedUncertainty::standard)
                             .map(OptionalDouble::of)
-                            .orElse(OptionalDouble.empty())));
+                            .orElse(OptionalDouble.empty()),
+                    planned.uncertainty()
+                            .map(PlannedChannel.StatedUncertainty::sharedStandard)
+                            .orElse(0.0)));
         }
         return List.copyOf(bound);
     }

@@ -15,6 +15,7 @@ import org.steamwitness.trace.QuantityKind;
  * @param values samples in kelvin or absolute pascal, NaN where missing
  * @param lag the sensor's lag, as stated
  * @param commonUncertainty standard uncertainty that all samples share, in kelvin or pascal; empty if not stated
+ * @param sharedUncertainty the part of it that is the same error in all channels with such a part; zero if not stated
  */
 public record BoundChannel(
         String name,
@@ -23,7 +24,8 @@ public record BoundChannel(
         Contact contact,
         Column values,
         PlannedChannel.Lag lag,
-        OptionalDouble commonUncertainty) {
+        OptionalDouble commonUncertainty,
+        double sharedUncertainty) {
 
     /**
      * Tells whether the sensor stands in the chamber's steam, so that saturation applies to it.

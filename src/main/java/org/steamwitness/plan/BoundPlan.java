@@ -74,6 +74,19 @@ public record BoundPlan(
     }
 
     /**
+     * The channels that a lethality is wanted of.
+     *
+     * @param aim one of the plan's
+     * @return in the order of the plan; empty if the plan has none such
+     */
+    public List<BoundChannel> probesOf(LethalityAim aim) {
+        return channels.stream()
+                .filter(c -> c.kind() == QuantityKind.TEMPERATURE)
+                .filter(c -> aim.probes().includes(c.name(), c.place()))
+                .toList();
+    }
+
+    /**
      * What binding gives.
      *
      * @param plan the bound plan

@@ -1,11 +1,11 @@
 package org.steamwitness.plan;
 
 import java.time.LocalDate;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.function.Function;
 import org.steamwitness.quantity.Datum;
@@ -43,7 +43,7 @@ final class PlanReader {
         Entry<Double> longestGap = at.may("longest-gap").parsed("a duration such as 10 s", QuantityText::seconds);
         Entry<Double> scanDelay = at.may("scan-delay").parsed("a duration such as 2 s", QuantityText::seconds);
         Entry<SaturationTolerance> saturation = at.may("saturation").section(PlanReader::saturation);
-        Entry<List<LethalityAim>> lethality = at.may("lethality").list(slot -> slot.section(PlanReader::lethality));
+        Entry<List<LethalityAim>> lethality = at.may("lethality").list(slot -> slot.section(LethalityReader::aim));
         Entry<DecisionRule> decision = at.need("decision").section(PlanReader::decision);
         Entry<Set<String>> required = at.may("run-sheet").section(PlanReader::requiredEntries);
         format.get();
@@ -148,8 +148,9 @@ final class PlanReader {
     private static PlannedChannel.StatedUncertainty uncertainty(Section at, Function<String, Double> difference) {
         Entry<Double> calibration = at.need("calibration").parsed("a quantity such as 0.2 K", difference);
         Entry<Double> drift = at.may("drift").parsed("a quantity such as 0.1 K", difference);
+        Entry<Double> shared = at.may("shared").parsed("a quantity such as 0.1 K", difference);
         Entry<Double> coverage = at.need("coverage").parsed("a number such as 2", PlanReader::coverage);
-        return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), coverage.get());
+        return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), shared.or(0.0), coverage.get());
     }
 
     private static PlannedChannel.Lag lag(Section at) {
@@ -196,39 +197,6 @@ final class PlanReader {
                 at.need("superheat").parsed("a temperature difference such as 2.0 K", QuantityText::kelvinDifference);
         Entry<Double> shortest = at.may("shortest").parsed("a duration such as 10 s", QuantityText::seconds);
         return new SaturationTolerance(air.get(), superheat.get(), shortest.or(DEFAULT_SHORTEST_SECONDS));
-    }
-
-    private static LethalityAim lethality(Section at) {
-        Entry<String> name = at.need("name").text();
-        Entry<Double> reference =
-                at.need("reference").parsed("a temperature such as 121.11 degC", QuantityText::kelvin);
-        Entry<Double> z = at.need("z").parsed("a temperature difference such as 10 K", QuantityText::kelvinDifference);
-        Entry<OptionalDouble> floor = at.need("floor")
-                .parsed(
-                        "a temperature such as 100 degC, or none",
-                        text -> text.equals("none")
-                                ? OptionalDouble.empty()
-                                : OptionalDouble.of(QuantityText.kelvin(text)));
-        Entry<Double> minimum = at.need("minimum").parsed("a duration such as 6.0 min", QuantityText::seconds);
-        Entry<String> channels = at.need("channels").parsed("product", PlanReader::product);
-        Entry<Boolean> cooling = at.need("cooling").parsed("counted or not-counted", PlanReader::counted);
-        channels.get();
-        return new LethalityAim(name.get(), reference.get(), z.get(), floor.get(), minimum.get(), cooling.get());
-    }
-
-    private static String product(String text) {
-        if (!text.equals(Place.PRODUCT.word())) {
-            throw new IllegalArgumentException("\"" + text + "\" is not one of: product");
-        }
-        return text;
-    }
-
-    private static boolean counted(String text) {
-        return switch (text) {
-            case "counted" -> true;
-            case "not-counted" -> false;
-            default -> throw new IllegalArgumentException("\"" + text + "\" is not one of: counted, not-counted");
-        };
     }
 
     private static DecisionRule decision(Section at) {
@@ -287,7 +255,7 @@ final class PlanReader {
                                 + "\"; state it, or decide by the simple rule");
             }
         }
-        Map<String, PlannedChannel> byName = new java.util.HashMap<>();
+        Map<String, PlannedChannel> byName = new HashMap<>();
         plan.channels().forEach(channel -> byName.put(channel.name(), channel));
         for (String start : plan.hold().startChannels()) {
             PlannedChannel channel = byName.get(start);
@@ -295,6 +263,14 @@ final class PlanReader {
                 at.refuse("hold", "starts.channels names \"" + start + "\", which is not among the channels");
             } else if (channel.rule().kind() != QuantityKind.TEMPERATURE || channel.place() == Place.PRODUCT) {
                 at.refuse("hold", "starts.channels names \"" + start + "\"; expected a temperature in the chamber");
+            }
+        }
+        for (LethalityAim aim : plan.lethality()) {
+            for (String probe : aim.probes().names()) {
+                PlannedChannel channel = byName.get(probe);
+                if (channel == null || channel.rule().kind() != QuantityKind.TEMPERATURE) {
+                    at.refuse("lethality", "channels names \"" + probe + "\", which is no temperature channel");
+                }
             }
         }
         long pressures = plan.channels().stream()

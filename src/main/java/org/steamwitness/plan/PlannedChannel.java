@@ -39,9 +39,29 @@ public record PlannedChannel(
      *
      * @param calibration expanded uncertainty of the calibration, in kelvin or pascal
      * @param drift expanded allowance for drift since, in kelvin or pascal
-     * @param coverage the factor by which both were expanded
+     * @param shared the expanded part of the calibration's uncertainty that is the same error in all channels that state
+     *     it, such as that of the thermometer they were all calibrated against; it cancels between them
+     * @param coverage the factor by which all were expanded
      */
-    public record StatedUncertainty(double calibration, double drift, double coverage) {
+    public record StatedUncertainty(double calibration, double drift, double shared, double coverage) {
+
+        /**
+         * Checks the parts.
+         *
+         * @param calibration expanded uncertainty of the calibration
+         * @param drift expanded allowance for drift since
+         * @param shared the part of the calibration's uncertainty that channels share
+         * @param coverage the factor by which all were expanded
+         * @throws IllegalArgumentException if a part is below zero, or the shared one exceeds the calibration's
+         */
+        public StatedUncertainty {
+            if (!(calibration >= 0 && drift >= 0 && shared >= 0)) {
+                throw new IllegalArgumentException("an uncertainty is zero or more");
+            }
+            if (shared > calibration) {
+                throw new IllegalArgumentException("shared is a part of calibration and may not exceed it");
+            }
+        }
 
         /**
          * The standard uncertainty that all samples share.
@@ -50,6 +70,15 @@ public record PlannedChannel(
          */
         public double standard() {
             return Math.sqrt(calibration * calibration + drift * drift) / coverage;
+        }
+
+        /**
+         * The standard uncertainty that all channels that state it share.
+         *
+         * @return in kelvin or pascal, zero if none is stated
+         */
+        public double sharedStandard() {
+            return shared / coverage;
         }
     }
 

@@ -35,6 +35,10 @@ final class Slot {
         return node instanceof MappingNode;
     }
 
+    boolean isList() {
+        return node instanceof SequenceNode;
+    }
+
     /** Text as written, whatever type YAML would make of it. */
     Entry<String> text() {
         return parsed("text", Function.identity());

@@ -52,14 +52,33 @@ public record HoldPart(List<Step> steps) {
      * @param mean time-weighted mean
      * @param highest highest sample
      * @param lowestAtSeconds when it was lowest
+     * @param uncertainty standard uncertainties of these temperatures, kelvin
      */
-    public record PerChannel(String channel, double lowest, double mean, double highest, double lowestAtSeconds) {}
+    public record PerChannel(
+            String channel,
+            double lowest,
+            double mean,
+            double highest,
+            double lowestAtSeconds,
+            Given<Uncertainty> uncertainty) {}
+
+    /**
+     * Standard uncertainties of one channel's temperatures, in kelvin.
+     *
+     * @param lowest of the lowest sample
+     * @param mean of the mean, in which noise averages out
+     * @param highest of the highest sample
+     */
+    public record Uncertainty(double lowest, double mean, double highest) {}
 
     /**
      * Difference between steam-contact probes at one instant.
      *
      * @param highest the greatest
      * @param atSeconds when
+     * @param hottest the hottest channel then
+     * @param coldest the coldest channel then
+     * @param uncertainty standard uncertainty of the difference, without what both sensors share, kelvin
      */
-    public record Spread(double highest, double atSeconds) {}
+    public record Spread(double highest, double atSeconds, String hottest, String coldest, Given<Double> uncertainty) {}
 }

@@ -3,7 +3,7 @@ package org.steamwitness.record;
 import java.util.List;
 
 /**
- * One lethality aim and what the product probes reached.
+ * One lethality aim and what its probes reached.
  *
  * @param name such as "F0"
  * @param referenceCelsius reference temperature
@@ -11,9 +11,12 @@ import java.util.List;
  * @param floorCelsius below it nothing counts
  * @param unit unit of every value here
  * @param minimum the plan's minimum
- * @param counted what counts towards it
- * @param perChannel one entry a product probe
+ * @param maximum the plan's maximum
+ * @param counted what counts towards them
+ * @param probes which channels the plan wants it of
+ * @param perChannel one entry a probe
  * @param governing the probe that reached least
+ * @param decimalReduction what the governing probe's lethality reduces, and how far
  */
 public record LethalityPart(
         String name,
@@ -21,10 +24,13 @@ public record LethalityPart(
         double zKelvin,
         Given<Double> floorCelsius,
         String unit,
-        double minimum,
+        Given<Double> minimum,
+        Given<Double> maximum,
         String counted,
+        String probes,
         List<PerChannel> perChannel,
-        Given<Governing> governing) {
+        Given<Governing> governing,
+        Given<Reduction> decimalReduction) {
 
     /**
      * What one probe reached.
@@ -34,10 +40,11 @@ public record LethalityPart(
      * @param toSteamOff up to the end of the hold phase
      * @param withCooling over the whole run
      * @param perPhase one value a phase
-     * @param interval what counts towards the minimum, if the sensor was off by its expanded uncertainty (k = 2)
+     * @param interval what counts towards the limits, if the sensor was off by its expanded uncertainty (k = 2)
      * @param bridgedSeconds time over missing samples that a line bridged
      * @param lostSeconds time that counted as nothing
      * @param markedSeconds time at a steam-contact probe outside saturation
+     * @param markedValue what was gathered in it
      */
     public record PerChannel(
             String channel,
@@ -48,7 +55,8 @@ public record LethalityPart(
             Given<Interval> interval,
             double bridgedSeconds,
             double lostSeconds,
-            Given<Double> markedSeconds) {}
+            Given<Double> markedSeconds,
+            Given<Double> markedValue) {}
 
     /**
      * Lethality in one phase.
@@ -71,7 +79,17 @@ public record LethalityPart(
      * The probe that reached least.
      *
      * @param channel the probe
-     * @param value what counts towards the minimum
+     * @param value what counts towards the limits
      */
     public record Governing(String channel, double value) {}
+
+    /**
+     * A decimal reduction at the governing probe.
+     *
+     * @param of what is reduced
+     * @param timeMinutes time at the reference temperature that reduces it by a power of ten
+     * @param source where that time comes from
+     * @param powersOfTen by how many powers of ten the counted lethality reduces it
+     */
+    public record Reduction(String of, double timeMinutes, String source, double powersOfTen) {}
 }

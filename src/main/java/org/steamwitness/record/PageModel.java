@@ -158,7 +158,15 @@ final class PageModel {
         map.put("proven", Printed.duration(step.provenSeconds()));
         map.put("possible", Printed.duration(step.possibleSeconds()));
         map.put("attempts", Integer.toString(step.attempts().size()));
-        map.put("spread", step.spreadKelvin().printed(s -> Printed.fixed(s.highest(), 2) + " K"));
+        map.put(
+                "spread",
+                step.spreadKelvin()
+                        .printed(s -> Printed.fixed(s.highest(), 2) + " K"
+                                + s.uncertainty()
+                                        .value()
+                                        .map(u -> " ± " + Printed.fixed(2 * u, 2) + " K")
+                                        .orElse("") + ", "
+                                + s.hottest() + " above " + s.coldest()));
         map.put("hasProbes", !step.perChannel().isEmpty());
         map.put(
                 "probes",
@@ -167,7 +175,17 @@ final class PageModel {
                                 "channel", p.channel(),
                                 "lowest", Printed.fixed(p.lowest(), 2),
                                 "mean", Printed.fixed(p.mean(), 2),
-                                "highest", Printed.fixed(p.highest(), 2)))
+                                "highest", Printed.fixed(p.highest(), 2),
+                                "uncertainty",
+                                        p.uncertainty()
+                                                .value()
+                                                .map(u -> "± " + Printed.fixed(2 * u.lowest(), 2))
+                                                .orElse("–"),
+                                "meanUncertainty",
+                                        p.uncertainty()
+                                                .value()
+                                                .map(u -> "± " + Printed.fixed(2 * u.mean(), 2))
+                                                .orElse("–")))
                         .toList());
         return map;
     }
@@ -210,25 +228,52 @@ final class PageModel {
                             + Printed.fixed(part.zKelvin(), 1) + " K, floor "
                             + part.floorCelsius().printed(f -> Printed.fixed(f, 1) + " °C")
                             + ", " + part.counted() + " counted");
-            map.put("minimum", Printed.fixed(part.minimum(), 1) + " min");
-            map.put("least", part.governing().printed(g -> Printed.fixed(g.value(), 2) + " min at " + g.channel()));
+            map.put("unit", part.unit());
+            map.put(
+                    "limits",
+                    "minimum " + limit(part.minimum(), part.unit())
+                            + part.maximum()
+                                    .value()
+                                    .map(m -> "; maximum " + limit(part.maximum(), part.unit()))
+                                    .orElse(""));
+            map.put(
+                    "least",
+                    part.governing()
+                            .printed(g -> Printed.fixed(g.value(), 2) + " " + part.unit() + " at " + g.channel()));
+            map.put(
+                    "reduction",
+                    part.decimalReduction()
+                            .value()
+                            .map(r -> "It reduces " + r.of() + " by " + Printed.fixed(r.powersOfTen(), 1)
+                                    + " powers of ten (D " + Printed.fixed(r.timeMinutes(), 3) + " min, " + r.source()
+                                    + ").")
+                            .orElse(""));
             map.put("hasProbes", !part.perChannel().isEmpty());
             map.put(
                     "probes",
                     part.perChannel().stream()
                             .map(p -> Map.of(
-                                    "channel", p.channel(),
+                                    "channel", p.channel() + (p.contact().equals("steam") ? ", in steam" : ""),
                                     "toSteamOff", Printed.fixed(p.toSteamOff(), 2),
                                     "withCooling", Printed.fixed(p.withCooling(), 2),
                                     "interval",
                                             p.interval()
                                                     .printed(i -> Printed.fixed(i.low(), 2) + " to "
                                                             + Printed.fixed(i.high(), 2)),
-                                    "lost", Printed.duration(p.lostSeconds())))
+                                    "lost", Printed.duration(p.lostSeconds()),
+                                    "marked",
+                                            p.markedValue()
+                                                    .value()
+                                                    .map(m -> Printed.fixed(m, 2))
+                                                    .orElse("–")))
                             .toList());
             aims.add(map);
         }
         return aims;
+    }
+
+    private static String limit(Given<Double> limit, String unit) {
+        return limit.value().map(l -> Printed.fixed(l, 1) + " " + unit).orElse("none");
     }
 
     private List<Map<String, String>> phases() {

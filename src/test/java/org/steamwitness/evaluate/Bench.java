@@ -11,9 +11,11 @@ import org.steamwitness.plan.Contact;
 import org.steamwitness.plan.DecisionRule;
 import org.steamwitness.plan.Hold;
 import org.steamwitness.plan.LethalityAim;
+import org.steamwitness.plan.LethalityUnit;
 import org.steamwitness.plan.Marks;
 import org.steamwitness.plan.Plan;
 import org.steamwitness.plan.PlannedChannel;
+import org.steamwitness.plan.ProbeChoice;
 import org.steamwitness.plan.SaturationTolerance;
 import org.steamwitness.trace.Column;
 import org.steamwitness.trace.LogClock;
@@ -28,6 +30,7 @@ public final class Bench {
     private List<BoundChannel> channels = List.of();
     private Hold hold = new Hold(121.1 + 273.15, 124.1 + 273.15, Optional.empty(), 60, List.of("chamber"));
     private List<LethalityAim> lethality = List.of();
+    private double longestGap = 10;
     private double scanDelay;
     private DecisionRule decision = new DecisionRule(true, 0.95);
     private Marks marks = new Marks(OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
@@ -56,7 +59,8 @@ public final class Bench {
                 place.steamContact() ? Contact.STEAM : Contact.SEALED,
                 Column.of(Arrays.stream(celsius).map(c -> c + 273.15).toArray()),
                 PlannedChannel.Lag.NONE,
-                OptionalDouble.of(common));
+                OptionalDouble.of(common),
+                0);
     }
 
     public static BoundChannel pressure(double commonKilopascal, double... kilopascal) {
@@ -67,7 +71,8 @@ public final class Bench {
                 Contact.STEAM,
                 Column.of(Arrays.stream(kilopascal).map(p -> p * 1000).toArray()),
                 PlannedChannel.Lag.NONE,
-                OptionalDouble.of(commonKilopascal * 1000));
+                OptionalDouble.of(commonKilopascal * 1000),
+                0);
     }
 
     public Bench with(BoundChannel... measured) {
@@ -86,6 +91,33 @@ public final class Bench {
         return this;
     }
 
+    /** F at the product probes with z 10 K. */
+    public static LethalityAim aim(double referenceCelsius, double minimumSeconds, boolean coolingCounted) {
+        return new LethalityAim(
+                "F0",
+                referenceCelsius + 273.15,
+                10,
+                OptionalDouble.empty(),
+                LethalityUnit.MINUTE,
+                LethalityAim.Limits.atLeast(minimumSeconds),
+                ProbeChoice.PRODUCT,
+                coolingCounted,
+                Optional.empty());
+    }
+
+    /** The same channel, a part of whose uncertainty is the same error in all that share it. */
+    public static BoundChannel sharing(BoundChannel channel, double shared) {
+        return new BoundChannel(
+                channel.name(),
+                channel.kind(),
+                channel.place(),
+                channel.contact(),
+                channel.values(),
+                channel.lag(),
+                channel.commonUncertainty(),
+                shared);
+    }
+
     /** The same channel with a stated lag. */
     public static BoundChannel lagging(BoundChannel channel, double seconds, double uncertaintySeconds) {
         return new BoundChannel(
@@ -95,7 +127,13 @@ public final class Bench {
                 channel.contact(),
                 channel.values(),
                 new PlannedChannel.Lag(seconds, uncertaintySeconds),
-                channel.commonUncertainty());
+                channel.commonUncertainty(),
+                channel.sharedUncertainty());
+    }
+
+    public Bench bridging(double longestGapSeconds) {
+        longestGap = longestGapSeconds;
+        return this;
     }
 
     public Bench scanning(double delaySeconds) {
@@ -128,7 +166,7 @@ public final class Bench {
                 Optional.of(new SaturationTolerance(1, 2, 10)),
                 lethality,
                 decision,
-                10,
+                longestGap,
                 scanDelay,
                 marks,
                 false,

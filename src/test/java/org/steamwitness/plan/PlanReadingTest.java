@@ -13,6 +13,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.steamwitness.finding.Finding;
 import org.steamwitness.quantity.Datum;
+import org.steamwitness.trace.Place;
 
 class PlanReadingTest {
 
@@ -37,6 +38,31 @@ class PlanReadingTest {
                 .isCloseTo(Math.sqrt(0.04 + 0.01) / 2, within(1e-15));
         assertThat(plan.lethality().get(0).floorKelvin()).isEmpty();
         assertThat(plan.decision()).isEqualTo(new DecisionRule(true, 0.95));
+    }
+
+    @Test
+    void readsKineticsOfEveryKind() {
+        String text = PLAN.replace("  - {name: F0,", """
+                          - {name: A0, reference: 80 degC, z: 10 K, floor: 65 degC, unit: s, minimum: 600 s,
+                             channels: [drain, chamber], cooling: not-counted}
+                          - {name: C100, reference: 100 degC, z: 33 K, floor: none, maximum: 90 min, channels: load,
+                             cooling: counted, decimal-reduction: {of: thiamine, time: 2.5 h, source: SP-120}}
+                          - {name: F0,""".stripTrailing())
+                .replaceFirst("drift: 0.1 K", "drift: 0.1 K, shared: 0.12 K");
+        Plan plan = plan(text).value().orElseThrow();
+        LethalityAim a0 = plan.lethality().get(0);
+        assertThat(a0.unit()).isEqualTo(LethalityUnit.SECOND);
+        assertThat(a0.limits()).isEqualTo(LethalityAim.Limits.atLeast(600));
+        assertThat(a0.probes().words()).isEqualTo("drain, chamber");
+        assertThat(a0.coolingCounted()).isFalse();
+        LethalityAim cook = plan.lethality().get(1);
+        assertThat(cook.unit()).isEqualTo(LethalityUnit.MINUTE);
+        assertThat(cook.limits().leastSeconds()).isEmpty();
+        assertThat(cook.limits().mostSeconds()).hasValue(5400);
+        assertThat(cook.probes().place()).contains(Place.LOAD);
+        assertThat(cook.reduction()).contains(new DecimalReduction("thiamine", 9000, "SP-120"));
+        assertThat(plan.channels().get(0).uncertainty().orElseThrow().sharedStandard())
+                .isEqualTo(0.06);
     }
 
     @Test
@@ -68,6 +94,14 @@ class PlanReadingTest {
             air: 1.0 K               | air: 0 K                 | p.yaml:32:13: saturation: the tolerances air and superheat must exceed zero
             conformance: 95 %        | conformance: 50 %        | p.yaml:35:40: decision.conformance: "50 %" is too low; expected more than 50 % and less than 100 %
             floor: none              | floor: nothing           | p.yaml:34:56: lethality[0].floor: "nothing" is not a temperature such as 121.1 degC; known units: degC, degF, K
+            minimum: 6.0 min         | minimum: 0 min           | p.yaml:34:5: lethality[0]: the minimum must exceed zero
+            minimum: 6.0 min         | maximum: 0 min           | p.yaml:34:5: lethality[0]: the maximum must exceed zero and may not lie below the minimum
+            channels: product        | channels: jacket         | p.yaml:34:90: lethality[0].channels: "jacket" is not one of: product, load; or list channels
+            channels: product        | channels: [can-3]        | p.yaml:33:1: lethality: channels names "can-3", which is no temperature channel
+            channels: product        | channels: [pressure]     | p.yaml:33:1: lethality: channels names "pressure", which is no temperature channel
+            minimum: 6.0 min         | unit: h                  | p.yaml:34:68: lethality[0].unit: "h" is not one of: min, s
+            drift: 0.1 K             | shared: 0.3 K            | p.yaml:14:19: channels[0].uncertainty: shared is a part of calibration and may not exceed it
+            calibration: 0.2 K       | calibration: -0.2 K      | p.yaml:14:19: channels[0].uncertainty: an uncertainty is zero or more
             required: [zone          | required: [zon           | p.yaml:36:24: run-sheet.required[0]: "zon" is no run sheet entry; known: *
             id: R2-stew-73x111       | id: [R2]                 | p.yaml:3:5: id: expected text
             revision: 3              | 'revision: 3\\nrevision: 4' | p.yaml:6:1: revision: stands twice; a key may stand once

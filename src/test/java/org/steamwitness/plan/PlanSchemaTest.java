@@ -78,7 +78,10 @@ class PlanSchemaTest {
             rule: guarded          | rule: strict
             {rule: guarded, conformance: 95 %} | {rule: simple, conformance: 95 %}
             floor: none            | floor: nothing
-            channels: product      | channels: load
+            channels: product      | channels: jacket
+            channels: product      | channels: []
+            minimum: 6.0 min       | unit: h
+            minimum: 6.0 min       | decimal-reduction: {of: spores, time: 12 s}
             cooling: counted       | cooling: yes
             required: [zone        | required: [zon
             id: R2-stew-73x111     | id: [R2]

@@ -27,8 +27,8 @@ public final class Criteria {
             BoundPlan plan, Phases phases, HoldResult hold, SaturationCheck saturation, List<Lethality> lethality) {
         List<Criterion> criteria = new ArrayList<>();
         criteria.add(HoldingTime.of(plan, hold));
-        SaturationAgreement.of(saturation, phases).ifPresent(criteria::add);
-        lethality.stream().map(LeastLethality::of).forEach(criteria::add);
+        SaturationAgreement.of(saturation, phases, plan.longestGapSeconds()).ifPresent(criteria::add);
+        lethality.stream().map(LethalityLimits::of).forEach(criteria::addAll);
         return List.copyOf(criteria);
     }
 }

@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
  * @param what in words
  * @param where channel or channels
  * @param phase phase it is judged in
- * @param unit unit of value, limit, margin and uncertainty: "s", "K", or "min" for lethality
+ * @param unit unit of value, limit, margin and uncertainty: "s", "K", or that of a lethality
  * @param value measured value; empty if there is none
  * @param limit the plan's limit
  * @param atLeast true if the value has to reach the limit, false if it may not exceed it

@@ -86,4 +86,16 @@ public final class GuardBand {
         }
         return surelyNot < limit ? Decision.NOT_MET : Decision.UNDECIDED;
     }
+
+    /**
+     * Decides on a value that may not exceed a limit, when the value is known to lie in an interval.
+     *
+     * @param surely what the value surely reaches
+     * @param surelyNot what the value surely does not exceed
+     * @param limit the limit
+     * @return met, not met or undecided
+     */
+    static Decision atMost(double surely, double surelyNot, double limit) {
+        return atLeast(-surelyNot, -surely, -limit);
+    }
 }

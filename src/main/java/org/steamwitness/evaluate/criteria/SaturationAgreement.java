@@ -10,23 +10,31 @@ import org.steamwitness.evaluate.saturation.Episode;
 import org.steamwitness.evaluate.saturation.PhaseDeparture;
 import org.steamwitness.evaluate.saturation.SaturationCheck;
 import org.steamwitness.plan.SaturationTolerance;
+import org.steamwitness.quantity.Printed;
 
 /**
  * The steam-contact probes stood at saturation in the hold phase: not met by a confirmed episode, undecided by a
- * possible one. The value shown is the departure that comes closest to its tolerance or exceeds it most.
+ * possible one, or when a probe could not be judged for longer than the longest gap. The value shown is the departure that comes closest to its tolerance or exceeds it most.
  */
 final class SaturationAgreement {
 
     private final SaturationCheck check;
     private final SaturationTolerance tolerance;
+    private final Optional<PhaseDeparture> unjudged;
 
-    private SaturationAgreement(SaturationCheck check, SaturationTolerance tolerance) {
+    private SaturationAgreement(
+            SaturationCheck check, SaturationTolerance tolerance, Optional<PhaseDeparture> unjudged) {
         this.check = check;
         this.tolerance = tolerance;
+        this.unjudged = unjudged;
     }
 
-    static Optional<Criterion> of(SaturationCheck check, Phases phases) {
-        return check.tolerance().map(tolerance -> new SaturationAgreement(check, tolerance).criterion(phases));
+    static Optional<Criterion> of(SaturationCheck check, Phases phases, double longestGapSeconds) {
+        Optional<PhaseDeparture> unjudged = phases.hold()
+                .flatMap(check::longestUnjudged)
+                .filter(p -> p.longestUnjudgedSeconds() > longestGapSeconds);
+        return check.tolerance()
+                .map(tolerance -> new SaturationAgreement(check, tolerance, unjudged).criterion(phases));
     }
 
     private Criterion criterion(Phases phases) {
@@ -80,7 +88,7 @@ final class SaturationAgreement {
         if (check.episodes().stream().anyMatch(Episode::confirmed)) {
             return Decision.NOT_MET;
         }
-        return check.episodes().isEmpty() ? Decision.MET : Decision.UNDECIDED;
+        return check.episodes().isEmpty() && unjudged.isEmpty() ? Decision.MET : Decision.UNDECIDED;
     }
 
     private String why() {
@@ -89,8 +97,17 @@ final class SaturationAgreement {
         return switch (decision()) {
             case MET -> "no episode in the hold phase";
             case NOT_MET -> "episodes in the hold phase: " + confirmed + " confirmed, " + possible + " possible";
-            default -> "possible episodes in the hold phase: " + possible + ", none beyond the sensors' uncertainty";
+            default ->
+                unjudged.filter(u -> possible == 0)
+                        .map(SaturationAgreement::unjudged)
+                        .orElse("possible episodes in the hold phase: " + possible
+                                + ", none beyond the sensors' uncertainty");
         };
+    }
+
+    private static String unjudged(PhaseDeparture probe) {
+        return "not judged for " + Printed.duration(probe.longestUnjudgedSeconds()) + " of the hold phase at "
+                + probe.channel().name() + ": temperature or pressure is missing or off the saturation line";
     }
 
     /** One side of saturation at one probe. */

@@ -3,6 +3,7 @@ package org.steamwitness.evaluate.hold;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.steamwitness.evaluate.instruments.Instruments;
 import org.steamwitness.evaluate.phase.HoldAttempt;
 import org.steamwitness.evaluate.phase.Phase;
 import org.steamwitness.evaluate.phase.Phases;
@@ -32,25 +33,26 @@ public record HoldResult(
      *
      * @param trace the samples
      * @param plan the bound plan
+     * @param instruments what is known of the channels
      * @param phases the phases
      * @return its times and temperatures
      */
-    public static HoldResult of(Trace trace, BoundPlan plan, Phases phases) {
+    public static HoldResult of(Trace trace, BoundPlan plan, Instruments instruments, Phases phases) {
         Optional<HoldAttempt> judged = phases.judged();
         if (judged.isEmpty()) {
             return new HoldResult(0, 0, List.of(), Optional.empty(), List.of());
         }
         HoldAttempt attempt = judged.get();
         Phase hold = phases.hold().orElseThrow();
-        List<ProbeInHold> probes = plan.channels().stream()
-                .filter(c -> c.kind() == QuantityKind.TEMPERATURE)
-                .flatMap(c -> ProbeInHold.of(trace, c, hold, plan.longestGapSeconds()).stream())
+        List<ProbeInHold> probes = instruments.channels().stream()
+                .filter(m -> m.channel().kind() == QuantityKind.TEMPERATURE)
+                .flatMap(m -> ProbeInHold.of(trace, m, hold, plan.longestGapSeconds()).stream())
                 .toList();
         return new HoldResult(
                 trace.seconds().at(attempt.to()) - trace.seconds().at(attempt.from()),
                 attempt.latestEndSeconds() - attempt.earliestStartSeconds(),
                 probes,
-                Spread.of(plan.inSteam(), hold),
+                Spread.greatest(plan.inSteam().stream().map(instruments::of).toList(), hold),
                 missing(plan, hold));
     }
 
@@ -75,33 +77,4 @@ public record HoldResult(
      * @param samples how many, one or more
      */
     public record MissingSamples(BoundChannel channel, int samples) {}
-
-    /**
-     * Difference between the hottest and the coldest steam-contact probe at one instant.
-     *
-     * @param kelvin the greatest one of the hold phase
-     * @param index of its sample
-     */
-    public record Spread(double kelvin, int index) {
-
-        static Optional<Spread> of(List<BoundChannel> probes, Phase hold) {
-            Spread greatest = null;
-            for (int i = hold.from(); i < hold.end(); i++) {
-                double lowest = Double.POSITIVE_INFINITY;
-                double highest = Double.NEGATIVE_INFINITY;
-                int present = 0;
-                for (BoundChannel probe : probes) {
-                    if (!probe.values().missing(i)) {
-                        lowest = Math.min(lowest, probe.values().at(i));
-                        highest = Math.max(highest, probe.values().at(i));
-                        present++;
-                    }
-                }
-                if (present > 1 && (greatest == null || highest - lowest > greatest.kelvin)) {
-                    greatest = new Spread(highest - lowest, i);
-                }
-            }
-            return Optional.ofNullable(greatest);
-        }
-    }
 }

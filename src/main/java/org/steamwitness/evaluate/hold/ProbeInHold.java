@@ -1,7 +1,9 @@
 package org.steamwitness.evaluate.hold;
 
 import java.util.Optional;
+import org.steamwitness.evaluate.instruments.ChannelMeasure;
 import org.steamwitness.evaluate.phase.Phase;
+import org.steamwitness.evaluate.uncertainty.SampleUncertainty;
 import org.steamwitness.plan.BoundChannel;
 import org.steamwitness.trace.SegmentWalk;
 import org.steamwitness.trace.Trace;
@@ -14,11 +16,21 @@ import org.steamwitness.trace.Trace;
  * @param meanKelvin time-weighted mean
  * @param highestKelvin highest sample
  * @param lowestIndex index of the lowest sample, the first if there are several
+ * @param samples how many samples were there
+ * @param uncertainty of one sample; empty if the plan states none
  */
 public record ProbeInHold(
-        BoundChannel channel, double lowestKelvin, double meanKelvin, double highestKelvin, int lowestIndex) {
+        BoundChannel channel,
+        double lowestKelvin,
+        double meanKelvin,
+        double highestKelvin,
+        int lowestIndex,
+        int samples,
+        Optional<SampleUncertainty> uncertainty) {
 
-    static Optional<ProbeInHold> of(Trace trace, BoundChannel channel, Phase hold, double longestGapSeconds) {
+    static Optional<ProbeInHold> of(Trace trace, ChannelMeasure measure, Phase hold, double longestGapSeconds) {
+        BoundChannel channel = measure.channel();
+        int samples = 0;
         int lowest = -1;
         double highest = Double.NEGATIVE_INFINITY;
         for (int i = hold.from(); i < hold.end(); i++) {
@@ -26,6 +38,7 @@ public record ProbeInHold(
             if (Double.isNaN(kelvin)) {
                 continue;
             }
+            samples++;
             lowest = lowest < 0 || kelvin < channel.values().at(lowest) ? i : lowest;
             highest = Math.max(highest, kelvin);
         }
@@ -38,7 +51,14 @@ public record ProbeInHold(
         double mean = coverage.coveredSeconds() > 0
                 ? area.kelvinSeconds / coverage.coveredSeconds()
                 : channel.values().at(lowest);
-        return Optional.of(new ProbeInHold(channel, channel.values().at(lowest), mean, highest, lowest));
+        return Optional.of(new ProbeInHold(
+                channel,
+                channel.values().at(lowest),
+                mean,
+                highest,
+                lowest,
+                samples,
+                channel.commonUncertainty().isPresent() ? Optional.of(measure.uncertainty()) : Optional.empty()));
     }
 
     private static final class Integral implements SegmentWalk.Visitor {

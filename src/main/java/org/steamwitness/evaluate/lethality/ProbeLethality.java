@@ -2,11 +2,14 @@ package org.steamwitness.evaluate.lethality;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 import org.steamwitness.evaluate.phase.Phase;
 import org.steamwitness.evaluate.phase.PhaseName;
 import org.steamwitness.plan.BoundChannel;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.trace.SegmentWalk;
+import org.steamwitness.trace.Stretch;
 import org.steamwitness.trace.Trace;
 
 /**
@@ -20,6 +23,7 @@ import org.steamwitness.trace.Trace;
  * @param highSeconds the same, if it read low
  * @param surelySeconds what counts towards the aim, if it read high by z standard uncertainties
  * @param surelyNotSeconds the same, if it read low
+ * @param marked what of the counted it gathered outside saturation; empty if it was not held against saturation
  * @param coverage bridged and lost time
  */
 public record ProbeLethality(
@@ -31,6 +35,7 @@ public record ProbeLethality(
         double highSeconds,
         double surelySeconds,
         double surelyNotSeconds,
+        Optional<MarkedLethality> marked,
         SegmentWalk.Coverage coverage) {
 
     /**
@@ -67,6 +72,7 @@ public record ProbeLethality(
                 shifted(walk, aim, end, 2 * common),
                 shifted(walk, aim, end, -scope.z() * common),
                 shifted(walk, aim, end, scope.z() * common),
+                scope.outside().apply(probe).map(outside -> MarkedLethality.of(walk, aim, outside, end)),
                 coverage);
     }
 
@@ -94,8 +100,13 @@ public record ProbeLethality(
      * @param phases the run's phases
      * @param longestGapSeconds longest time between two samples that a line may bridge
      * @param z standard uncertainties that make a value sure, one-sided
+     * @param outside where a channel stood outside saturation; empty if it was not held against it
      */
-    record Scope(List<Phase> phases, double longestGapSeconds, double z) {
+    record Scope(
+            List<Phase> phases,
+            double longestGapSeconds,
+            double z,
+            Function<BoundChannel, Optional<List<Stretch>>> outside) {
 
         /** Index of the first sample behind the hold phase, or of the last sample of the run. */
         int steamOffIndex() {

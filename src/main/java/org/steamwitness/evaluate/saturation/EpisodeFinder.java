@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.IntPredicate;
 import org.steamwitness.plan.SaturationTolerance;
+import org.steamwitness.trace.Stretch;
 import org.steamwitness.trace.Trace;
 
 /**
@@ -96,6 +97,4 @@ final class EpisodeFinder {
     private double seconds(int index) {
         return trace.seconds().at(index);
     }
-
-    private record Stretch(int from, int to) {}
 }

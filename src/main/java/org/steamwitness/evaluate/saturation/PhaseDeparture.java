@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.steamwitness.evaluate.phase.Phase;
 import org.steamwitness.plan.BoundChannel;
+import org.steamwitness.trace.Column;
 
 /**
  * What one probe showed in one phase.
@@ -12,12 +13,18 @@ import org.steamwitness.plan.BoundChannel;
  * @param channel the probe
  * @param phase the phase
  * @param states how many samples were in each state that occurred
+ * @param longestUnjudgedSeconds longest time between two samples that could be judged, or from the phase's ends to them
  * @param figures its departures; empty if no sample could be judged
  */
 public record PhaseDeparture(
-        BoundChannel channel, Phase phase, Map<SampleState, Integer> states, Optional<Figures> figures) {
+        BoundChannel channel,
+        Phase phase,
+        Map<SampleState, Integer> states,
+        double longestUnjudgedSeconds,
+        Optional<Figures> figures) {
 
-    static PhaseDeparture of(Departure departure, Phase phase, SampleStates states, double toleranceKelvin, double z) {
+    static PhaseDeparture of(
+            Departure departure, Phase phase, Column seconds, SampleStates states, double toleranceKelvin, double z) {
         Map<SampleState, Integer> counts = new EnumMap<>(SampleState.class);
         int judged = 0;
         int lowest = -1;
@@ -27,6 +34,8 @@ public record PhaseDeparture(
         double air = 0;
         double airHighest = Double.NEGATIVE_INFINITY;
         double smallestAir = 0;
+        double lastJudged = seconds.at(phase.from());
+        double longestUnjudged = 0;
         for (int i = phase.from(); i < phase.end(); i++) {
             counts.merge(states.at(i), 1, Integer::sum);
             double kelvin = departure.kelvinAt(i);
@@ -34,6 +43,8 @@ public record PhaseDeparture(
                 continue;
             }
             judged++;
+            longestUnjudged = Math.max(longestUnjudged, seconds.at(i) - lastJudged);
+            lastJudged = seconds.at(i);
             sum += kelvin;
             squares += kelvin * kelvin;
             lowest = lowest < 0 || kelvin < departure.kelvinAt(lowest) ? i : lowest;
@@ -44,6 +55,7 @@ public record PhaseDeparture(
             smallestAir = Math.max(
                     smallestAir, departure.airFractionFor(toleranceKelvin + z * departure.uncertaintyAt(i), i));
         }
+        longestUnjudged = Math.max(longestUnjudged, seconds.at(phase.end() - 1) - lastJudged);
         Optional<Figures> figures = judged == 0
                 ? Optional.empty()
                 : Optional.of(new Figures(
@@ -54,7 +66,7 @@ public record PhaseDeparture(
                         air / judged,
                         airHighest,
                         smallestAir));
-        return new PhaseDeparture(departure.channel(), phase, counts, figures);
+        return new PhaseDeparture(departure.channel(), phase, counts, longestUnjudged, figures);
     }
 
     private static Extreme extreme(Departure departure, int index) {

@@ -21,6 +21,10 @@ public enum SampleState {
         this.word = word;
     }
 
+    boolean outside() {
+        return this != SATURATED && this != NOT_JUDGED;
+    }
+
     /**
      * The word used in records.
      *

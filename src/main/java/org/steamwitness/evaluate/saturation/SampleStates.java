@@ -1,6 +1,9 @@
 package org.steamwitness.evaluate.saturation;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.steamwitness.plan.SaturationTolerance;
+import org.steamwitness.trace.Stretch;
 
 /** Names the state of each sample of one probe: the tolerance first, then the uncertainty. */
 final class SampleStates {
@@ -20,6 +23,22 @@ final class SampleStates {
         this.departure = departure;
         this.tolerance = tolerance;
         this.z = z;
+    }
+
+    /** Every stretch of samples that stand outside the tolerance, possible or confirmed. */
+    List<Stretch> outside(int samples) {
+        List<Stretch> stretches = new ArrayList<>();
+        int first = -1;
+        for (int i = 0; i <= samples; i++) {
+            boolean outside = i < samples && at(i).outside();
+            if (outside && first < 0) {
+                first = i;
+            } else if (!outside && first >= 0) {
+                stretches.add(new Stretch(first, i - 1));
+                first = -1;
+            }
+        }
+        return List.copyOf(stretches);
     }
 
     SampleState at(int index) {

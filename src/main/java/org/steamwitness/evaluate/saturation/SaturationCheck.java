@@ -2,6 +2,7 @@ package org.steamwitness.evaluate.saturation;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -12,6 +13,7 @@ import org.steamwitness.plan.BoundChannel;
 import org.steamwitness.plan.BoundPlan;
 import org.steamwitness.plan.SaturationTolerance;
 import org.steamwitness.trace.Column;
+import org.steamwitness.trace.Stretch;
 import org.steamwitness.trace.Trace;
 
 /**
@@ -22,6 +24,7 @@ import org.steamwitness.trace.Trace;
  * @param tolerance the plan's tolerances
  * @param saturationKelvin saturation temperature of the measured pressure, one value a sample; NaN where unknown
  * @param departures one entry a steam-contact probe, sample by sample; empty if saturation was not judged
+ * @param outside where each probe stood outside the tolerance
  * @param perPhase what each probe showed in each phase
  * @param episodes in the hold phase, in the order of probes
  */
@@ -30,6 +33,7 @@ public record SaturationCheck(
         Optional<SaturationTolerance> tolerance,
         Column saturationKelvin,
         List<Departure> departures,
+        List<OutsideSaturation> outside,
         List<PhaseDeparture> perPhase,
         List<Episode> episodes) {
 
@@ -50,19 +54,21 @@ public record SaturationCheck(
         Optional<String> obstacle = obstacle(plan, phases);
         if (obstacle.isPresent()) {
             return new SaturationCheck(
-                    obstacle, plan.saturation(), saturation.kelvin(), List.of(), List.of(), List.of());
+                    obstacle, plan.saturation(), saturation.kelvin(), List.of(), List.of(), List.of(), List.of());
         }
         SaturationTolerance tolerance = plan.saturation().orElseThrow();
         List<PhaseDeparture> perPhase = new ArrayList<>();
         List<Departure> departures = new ArrayList<>();
+        List<OutsideSaturation> outside = new ArrayList<>();
         List<Episode> episodes = new ArrayList<>();
         for (BoundChannel probe : plan.inSteam()) {
             Departure departure = new Departure(
                     instruments.of(probe), instruments.of(pressure.orElseThrow()), saturation, trace.seconds(), plan);
             departures.add(departure);
             SampleStates states = new SampleStates(departure, tolerance, z);
+            outside.add(new OutsideSaturation(probe, states.outside(trace.size())));
             for (Phase phase : phases.phases()) {
-                perPhase.add(PhaseDeparture.of(departure, phase, states, tolerance.airKelvin(), z));
+                perPhase.add(PhaseDeparture.of(departure, phase, trace.seconds(), states, tolerance.airKelvin(), z));
             }
             EpisodeFinder finder = new EpisodeFinder(trace, departure, tolerance, states);
             phases.hold().ifPresent(hold -> episodes.addAll(finder.between(hold.from(), hold.end())));
@@ -72,6 +78,7 @@ public record SaturationCheck(
                 plan.saturation(),
                 saturation.kelvin(),
                 List.copyOf(departures),
+                List.copyOf(outside),
                 List.copyOf(perPhase),
                 List.copyOf(episodes));
     }
@@ -86,6 +93,31 @@ public record SaturationCheck(
         return perPhase.stream()
                 .filter(p -> p.phase().equals(phase) && p.figures().isPresent())
                 .toList();
+    }
+
+    /**
+     * The probe that went longest without a sample that could be judged.
+     *
+     * @param phase one of the run's phases
+     * @return empty if no probe was held against saturation
+     */
+    public Optional<PhaseDeparture> longestUnjudged(Phase phase) {
+        return perPhase.stream()
+                .filter(p -> p.phase().equals(phase))
+                .max(Comparator.comparingDouble(PhaseDeparture::longestUnjudgedSeconds));
+    }
+
+    /**
+     * Where a probe stood outside the tolerance.
+     *
+     * @param channel any channel
+     * @return in order of time; empty if the channel was not held against saturation
+     */
+    public Optional<List<Stretch>> outsideAt(BoundChannel channel) {
+        return outside.stream()
+                .filter(o -> o.channel().equals(channel))
+                .map(OutsideSaturation::stretches)
+                .findFirst();
     }
 
     /**

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -18,6 +19,8 @@ import org.steamwitness.finding.FindingKind;
 import org.steamwitness.finding.Position;
 import org.steamwitness.plan.DecisionRule;
 import org.steamwitness.plan.LethalityAim;
+import org.steamwitness.plan.LethalityUnit;
+import org.steamwitness.plan.ProbeChoice;
 import org.steamwitness.trace.Place;
 import org.steamwitness.trace.Reading;
 
@@ -77,7 +80,7 @@ class CriteriaTest {
                 .with(
                         Bench.temperature("chamber", Place.REFERENCE, 0.05, chamber),
                         Bench.temperature("can-1", Place.PRODUCT, 0.05, reference))
-                .aiming(new LethalityAim("F0", 121.11 + 273.15, 10, OptionalDouble.empty(), minimum, true)));
+                .aiming(Bench.aim(121.11, minimum, true)));
         Criterion lethality = evaluation.criteria().get(2);
         assertThat(lethality.value().orElseThrow()).isCloseTo(5, within(1e-9));
         assertThat(lethality.uncertainty().orElseThrow())
@@ -85,11 +88,94 @@ class CriteriaTest {
         assertThat(lethality.decision()).isEqualTo(decision);
     }
 
+    @ParameterizedTest
+    @CsvSource({"310, MET", "300, UNDECIDED", "290, NOT_MET"})
+    void aMaximumIsHeldAgainstTheGreatestProbe(double maximum, Decision decision) {
+        LethalityAim aim = chosen(
+                new ProbeChoice(Optional.of(Place.PRODUCT), List.of()),
+                LethalityUnit.SECOND,
+                new LethalityAim.Limits(OptionalDouble.empty(), OptionalDouble.of(maximum)));
+        double[] reference = new double[61];
+        Arrays.fill(reference, 121.11);
+        double[] cooler = new double[61];
+        Arrays.fill(cooler, 119);
+        Criterion most = evaluate(Bench.every(5, 61)
+                        .with(
+                                Bench.temperature("chamber", Place.REFERENCE, 0.05, reference),
+                                Bench.temperature("can-1", Place.PRODUCT, 0.05, cooler),
+                                Bench.temperature("can-2", Place.PRODUCT, 0.05, reference))
+                        .aiming(aim))
+                .criteria()
+                .get(2);
+        assertThat(most.id()).isEqualTo("lethality-F0-most");
+        assertThat(most.where()).isEqualTo("can-2");
+        assertThat(most.what()).isEqualTo("F0 at the greatest product probe");
+        assertThat(most.unit()).isEqualTo("s at 121.1 °C");
+        assertThat(most.value().orElseThrow()).isCloseTo(300, within(1e-6));
+        assertThat(most.atLeast()).isFalse();
+        assertThat(most.margin().orElseThrow()).isCloseTo(maximum - 300, within(1e-6));
+        assertThat(most.decision()).isEqualTo(decision);
+        assertThat(most.why()).startsWith("300 s of " + (int) maximum + " s, greatest of 2 probes");
+    }
+
+    /** Twenty samples at 122 degC gather 95 s times 10^0.089; five samples of a pocket do not help to reach a minimum. */
+    @Test
+    void whatIsGatheredOutsideSaturationDoesNotCountAsReached() {
+        double gathered = 95 * Math.pow(10, 0.089);
+        LethalityAim aim = chosen(
+                new ProbeChoice(Optional.empty(), List.of("chamber")),
+                LethalityUnit.MINUTE,
+                LethalityAim.Limits.atLeast(gathered * 0.9));
+        double[] pressed = steam(20);
+        Bench clean = Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.01, held(20)), Bench.pressure(0.1, pressed))
+                .aiming(aim);
+        Criterion reached = evaluate(clean).criteria().get(2);
+        assertThat(reached.decision()).isEqualTo(Decision.MET);
+        assertThat(reached.what()).isEqualTo("F0 at the least of chamber");
+        assertThat(reached.why()).endsWith("; in the chamber's steam, not in a product");
+        Arrays.fill(pressed, 8, 13, 230);
+        Criterion marked = evaluate(Bench.every(5, 20)
+                        .with(
+                                Bench.temperature("chamber", Place.REFERENCE, 0.01, held(20)),
+                                Bench.pressure(0.1, pressed))
+                        .aiming(aim))
+                .criteria()
+                .get(2);
+        assertThat(marked.value()).isEqualTo(reached.value());
+        assertThat(marked.decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(marked.why()).endsWith("; of it 0.61 min outside saturation, which does not count as reached");
+    }
+
+    @Test
+    void saturationIsUndecidedWhereAProbeWasNotJudgedForLongerThanTheLongestGap() {
+        double[] pressed = steam(20);
+        Arrays.fill(pressed, 8, 10, Double.NaN);
+        assertThat(saturationWith(pressed).decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(saturationWith(pressed).why())
+                .isEqualTo("not judged for 15 s of the hold phase at chamber: temperature or pressure is missing or off"
+                        + " the saturation line");
+        pressed[8] = 211.59;
+        assertThat(saturationWith(pressed).decision()).isEqualTo(Decision.MET);
+    }
+
+    private static Criterion saturationWith(double[] pressed) {
+        return evaluate(Bench.every(5, 20)
+                        .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)), Bench.pressure(1, pressed)))
+                .criteria()
+                .get(1);
+    }
+
+    private static LethalityAim chosen(ProbeChoice probes, LethalityUnit unit, LethalityAim.Limits limits) {
+        return new LethalityAim(
+                "F0", 121.11 + 273.15, 10, OptionalDouble.empty(), unit, limits, probes, true, Optional.empty());
+    }
+
     @Test
     void lethalityWithoutAProductProbeDoesNotApply() {
         Evaluation evaluation = evaluate(Bench.every(5, 20)
                 .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)))
-                .aiming(new LethalityAim("F0", 121.11 + 273.15, 10, OptionalDouble.empty(), 60, true)));
+                .aiming(Bench.aim(121.11, 60, true)));
         assertThat(evaluation.criteria().get(2).decision()).isEqualTo(Decision.NOT_APPLICABLE);
     }
 
@@ -196,7 +282,7 @@ class CriteriaTest {
                 1,
                 true,
                 OptionalDouble.empty(),
-                java.util.Optional.empty(),
+                Optional.empty(),
                 decision,
                 "why");
     }

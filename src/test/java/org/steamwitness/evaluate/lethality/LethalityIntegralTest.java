@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
@@ -12,6 +13,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
 import org.steamwitness.plan.LethalityAim;
+import org.steamwitness.plan.LethalityUnit;
+import org.steamwitness.plan.ProbeChoice;
 
 class LethalityIntegralTest {
 
@@ -101,7 +104,18 @@ class LethalityIntegralTest {
         OptionalDouble floor = floorCelsius.isPresent()
                 ? OptionalDouble.of(floorCelsius.getAsDouble() + 273.15)
                 : OptionalDouble.empty();
-        return new LethalityIntegral(new LethalityAim("F", reference + 273.15, z, floor, 60, true), 0);
+        return new LethalityIntegral(
+                new LethalityAim(
+                        "F",
+                        reference + 273.15,
+                        z,
+                        floor,
+                        LethalityUnit.MINUTE,
+                        LethalityAim.Limits.atLeast(60),
+                        ProbeChoice.PRODUCT,
+                        true,
+                        Optional.empty()),
+                0);
     }
 
     private static double[] numbers(String text) {
