@@ -17,6 +17,7 @@ import org.steamwitness.evaluate.criteria.Verdict.Outcome;
 import org.steamwitness.finding.Finding;
 import org.steamwitness.finding.FindingKind;
 import org.steamwitness.finding.Position;
+import org.steamwitness.finding.Severity;
 import org.steamwitness.plan.DecisionRule;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.plan.LethalityUnit;
@@ -59,6 +60,101 @@ class CriteriaTest {
         assertThat(time.decision()).isEqualTo(decision);
         assertThat(time.value()).hasValue(55);
         assertThat(time.margin()).hasValue(55 - required);
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            55 | 55 s of 55 s proven
+            60 | 55 s of 1 min 00 s proven, 1 min 05 s possible: the sampling interval leaves it open
+            90 | 55 s of 1 min 30 s proven
+            """)
+    void saysWhatTheSamplesProve(double required, String why) {
+        double[] celsius = new double[20];
+        Arrays.fill(celsius, 100);
+        Arrays.fill(celsius, 4, 16, 122);
+        Criterion time = evaluate(Bench.every(5, 20)
+                        .holding(required)
+                        .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius)))
+                .criteria()
+                .get(0);
+        assertThat(time.why()).isEqualTo(why);
+        assertThat(time.where()).isEqualTo("chamber");
+    }
+
+    /** The side that uses most of its tolerance is shown: 1.2 K of 2 K of superheat before 0.3 K of 1 K of air. */
+    @ParameterizedTest
+    @CsvSource({
+        "122, 123.2, 1.2, 2, false, MET, no episode in the hold phase",
+        "121.7, 122, -0.3, -1, true, MET, no episode in the hold phase",
+        "120.8, 122, -1.2, -1, true, UNDECIDED, 'possible episodes in the hold phase: 1, none beyond the sensors'"
+                + "' uncertainty'",
+        "120.2, 120.8, -1.8, -1, true, NOT_MET, 'episodes in the hold phase: 1 confirmed, 1 possible'"
+    })
+    void showsTheDepartureThatComesClosest(
+            double lower, double upper, double value, double limit, boolean atLeast, Decision decision, String why) {
+        double[] first = held(30);
+        Arrays.fill(first, 10, 20, lower);
+        double[] second = held(30);
+        Arrays.fill(second, 10, 20, upper);
+        double[] pressed = steam(30);
+        Criterion saturation = evaluate(Bench.every(5, 30)
+                        .with(
+                                Bench.temperature("chamber", Place.REFERENCE, 0.1, held(30)),
+                                Bench.temperature("drain", Place.DRAIN, 0.1, first),
+                                Bench.temperature("free-space", Place.FREE_SPACE, 0.1, second),
+                                Bench.pressure(1, pressed)))
+                .criteria()
+                .get(1);
+        assertThat(saturation.value().orElseThrow()).isCloseTo(value, within(0.01));
+        assertThat(saturation.limit()).isEqualTo(limit);
+        assertThat(saturation.atLeast()).isEqualTo(atLeast);
+        assertThat(saturation.decision()).isEqualTo(decision);
+        assertThat(saturation.why()).isEqualTo(why);
+        assertThat(saturation.index()).hasValue(10);
+        assertThat(saturation.uncertainty().orElseThrow()).isGreaterThan(0.1);
+    }
+
+    @Test
+    void theClosestCallHasTheLeastMarginInProportionToItsLimit() {
+        Criterion wide = marginal("wide", 120, 100);
+        Criterion near = marginal("near", 1050, 1000);
+        Criterion none = criterion(Criterion.Subject.SATURATION, Decision.NOT_APPLICABLE);
+        Verdict verdict = Verdict.of(List.of(wide, near), List.of(), false);
+        assertThat(verdict.closest().orElseThrow().id()).isEqualTo("near");
+        assertThat(Verdict.of(List.of(none), List.of(), false).closest()).isPresent();
+        assertThat(verdict.because()).containsExactly("every criterion is met");
+        assertThat(verdict.outcome().word()).isEqualTo("met");
+    }
+
+    @Test
+    void aVerdictNamesWhatMadeItSo() {
+        Criterion failed = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.NOT_MET);
+        assertThat(Verdict.of(List.of(failed), List.of(), false).because()).containsExactly("what: why");
+        assertThat(Decision.NOT_MET.word()).isEqualTo("not met");
+        Finding review = new Finding(
+                FindingKind.MARK_OUTSIDE_LOG,
+                Position.RUN,
+                Map.of("mark", "steam-on", "time", "08:00", "first", "09:00", "last", "10:00"));
+        Criterion met = criterion(Criterion.Subject.TIME_OR_TEMPERATURE, Decision.MET);
+        assertThat(review.severity()).isEqualTo(Severity.REVIEW);
+        assertThat(outcome(List.of(met), List.of(review))).isEqualTo(Outcome.MET);
+    }
+
+    private static Criterion marginal(String id, double value, double limit) {
+        return new Criterion(
+                id,
+                Criterion.Subject.TIME_OR_TEMPERATURE,
+                "what",
+                "where",
+                "hold",
+                "s",
+                OptionalDouble.of(value),
+                limit,
+                true,
+                OptionalDouble.empty(),
+                Optional.empty(),
+                Decision.MET,
+                "why");
     }
 
     @Test
@@ -176,7 +272,12 @@ class CriteriaTest {
         Evaluation evaluation = evaluate(Bench.every(5, 20)
                 .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)))
                 .aiming(Bench.aim(121.11, 60, true)));
-        assertThat(evaluation.criteria().get(2).decision()).isEqualTo(Decision.NOT_APPLICABLE);
+        Criterion lethality = evaluation.criteria().get(2);
+        assertThat(lethality.decision()).isEqualTo(Decision.NOT_APPLICABLE);
+        assertThat(lethality.what()).isEqualTo("F0 at the least product probe");
+        assertThat(lethality.where()).isEqualTo("product");
+        assertThat(lethality.unit()).isEqualTo("min");
+        assertThat(lethality.why()).isEqualTo("not measured: no product probe; judged by time and temperature");
     }
 
     @Test
@@ -187,6 +288,8 @@ class CriteriaTest {
         assertThat(saturation.decision()).isEqualTo(Decision.UNDECIDED);
         assertThat(saturation.why()).isEqualTo("not judged: the chamber's absolute pressure is not known");
         assertThat(saturation.value()).isEmpty();
+        assertThat(saturation.limit()).isEqualTo(-1);
+        assertThat(saturation.atLeast()).isTrue();
     }
 
     @Test

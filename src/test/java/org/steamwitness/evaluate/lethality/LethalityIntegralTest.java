@@ -12,6 +12,7 @@ import net.jqwik.api.constraints.DoubleRange;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.plan.LethalityUnit;
 import org.steamwitness.plan.ProbeChoice;
@@ -74,6 +75,23 @@ class LethalityIntegralTest {
         double a = Math.log(10) * step / 10;
         double exact = Math.pow(10, (110 - 121.11) / 10) * Math.expm1(a) / a;
         assertThat(piece(110, 110 + step, 1, OptionalDouble.empty())).isCloseTo(exact, within(1e-12 * exact));
+    }
+
+    /** expm1(a)/a at steps on both sides of where the series takes over, to the last digits of a double. */
+    @ParameterizedTest
+    @ValueSource(doubles = {0, 1e-9, 1e-5, 0.001, 0.01, 0.02, 0.03, 0.04, 0.0434, 0.0435, 0.05, -0.01, -0.04, -0.0434})
+    void theSeriesIsExactToTheLastDigits(double step) {
+        LethalityIntegral integral = integral(0, 10, OptionalDouble.empty());
+        integral.segment(0, 273.15, 1, 273.15 + step);
+        double a = Math.log(10) * (273.15 + step - 273.15) / 10;
+        double exact = a == 0 ? 1 : Math.expm1(a) / a;
+        assertThat(integral.seconds()).isCloseTo(exact, within(Math.abs(a) < 1e-2 ? 3e-15 : 3e-14));
+    }
+
+    @Test
+    void aSegmentThatOnlyTouchesTheFloorCountsAsNothingMore() {
+        assertThat(piece(100, 90, 10, OptionalDouble.of(100))).isZero();
+        assertThat(piece(90, 100, 10, OptionalDouble.of(100))).isZero();
     }
 
     @Property

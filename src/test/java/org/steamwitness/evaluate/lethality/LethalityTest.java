@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -166,6 +167,38 @@ class LethalityTest {
         assertThat(results.get(0).probes().get(0).marked()).isEmpty();
         assertThat(results.get(1).probes()).extracting(p -> p.channel().name()).containsExactly("can-1", "can-2");
         assertThat(results.get(1).greatest().orElseThrow().channel().name()).isEqualTo("can-2");
+    }
+
+    @Test
+    void theGreatestIsFoundWhereverItStands() {
+        Bench bench = Bench.every(5, 3)
+                .with(
+                        Bench.temperature("can-1", Place.PRODUCT, 0.1, 121, 121, 121),
+                        Bench.temperature("can-2", Place.PRODUCT, 0.1, 120, 120, 120))
+                .aiming(F0);
+        assertThat(result(bench).greatest().orElseThrow().channel().name()).isEqualTo("can-1");
+        assertThat(result(bench).governing().orElseThrow().channel().name()).isEqualTo("can-2");
+    }
+
+    /** Steam-off is the end of the hold phase, not of the phase that happens to come first. */
+    @Test
+    void countsToSteamOffThroughStandingAndHeating() {
+        Bench bench = Bench.every(5, 9)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.1, 20, 100, 122, 122, 122, 122, 100, 60, 60),
+                        flat("can-1", 9))
+                .marked(5, 10, Double.NaN)
+                .aiming(F0);
+        ProbeLethality probe = result(bench).probes().get(0);
+        assertThat(probe.toSteamOffSeconds()).isCloseTo(30, within(1e-9));
+        assertThat(probe.withCoolingSeconds()).isCloseTo(40, within(1e-9));
+        assertThat(probe.perPhase()).hasSizeGreaterThan(3);
+    }
+
+    private static BoundChannel flat(String name, int samples) {
+        double[] celsius = new double[samples];
+        Arrays.fill(celsius, 121.1);
+        return Bench.temperature(name, Place.PRODUCT, 0.1, celsius);
     }
 
     /** The whole run is shifted by an hour: no sample moves against another, so nothing changes. */
