@@ -18,7 +18,7 @@ final class NotJudgedList {
                     "product lethality", "not measured; judged by time, temperature and initial temperature"));
         }
         list.add(new NotJudged("energy", "not evaluated by this version"));
-        list.add(new NotJudged("sensors (noise, lag, drift, slipped probes)", "not evaluated by this version"));
+        list.add(new NotJudged("sensors (dead, drifting or slipped probes)", "not evaluated by this version"));
         list.add(new NotJudged(
                 "vent, initial temperature, indicating device, cooling", "the plan sets no criterion for them"));
         list.add(new NotJudged("product safety", "for qualified people to decide"));
