@@ -52,7 +52,7 @@ final class TerminalPage {
                 run.product().printed(p -> p.name() + ", lots " + p.lots().printed(l -> String.join(", ", l)));
         wrapped("Run          ", run.run() + ", equipment " + run.equipment() + ", " + product);
         lines.add("Log          " + record.provenance().log().name() + ", "
-                + record.phases().get(0).startLocal().replace('T', ' ') + ", zone "
+                + record.phases().get(0).startLocal().printed(l -> l.replace('T', ' ')) + ", zone "
                 + run.zone().printed(z -> z));
         lines.add("Plan         " + record.plan().id() + ", revision "
                 + record.plan().revision() + ", " + record.plan().status().replace('-', ' '));

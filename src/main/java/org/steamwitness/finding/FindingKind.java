@@ -11,8 +11,28 @@ public enum FindingKind {
     /** Bytes that are no text. */
     LOG_NOT_TEXT(
             Severity.BLOCKS,
-            "The file is not text in UTF-8: {why}.",
-            "Export the log as delimited text in UTF-8 and evaluate that file."),
+            "The file is no text that could be a log: {why}.",
+            "Export the log as delimited text and evaluate that file."),
+    /** Text in an encoding that can't be told. */
+    ENCODING_UNDECIDED(
+            Severity.BLOCKS,
+            "The character encoding of the log can't be told: {why}.",
+            "Export it again in one encoding, or name it in the plan under reading.encoding."),
+    /** Two delimiters fit. */
+    DELIMITER_UNDECIDED(
+            Severity.BLOCKS,
+            "The log reads as rows with {one} and with {other} between the fields.",
+            "Name the delimiter in the plan under reading.delimiter."),
+    /** Day and month can't be told apart. */
+    DATE_ORDER_UNDECIDED(
+            Severity.BLOCKS,
+            "Day and month of the log's dates can't be told apart: {why}; the first is \"{example}\".",
+            "Say in the plan which comes first, under reading.time-format: day-month-year or month-day-year."),
+    /** The times have several meanings. */
+    TIME_UNDECIDED(
+            Severity.BLOCKS,
+            "The meaning of the log's times can't be told: {why}.",
+            "Say in the plan how they are written, under reading.time-format."),
     /** Nothing that could be a sample. */
     LOG_EMPTY(
             Severity.BLOCKS,
@@ -22,12 +42,12 @@ public enum FindingKind {
     LOG_WITHOUT_TIME(
             Severity.BLOCKS,
             "No usable time base: {why}.",
-            "The first column must hold ISO 8601 times such as 2026-03-14T08:05:00."),
+            "Check that the log is delimited text with a column of times; name it in the plan under reading.time-columns."),
     /** A planned column is not there. */
     COLUMN_ABSENT(
             Severity.BLOCKS,
             "The plan's channel {channel} needs a column with the header \"{column}\"; the log has: {headers}.",
-            "Name the header in the plan exactly as the log writes it."),
+            "Name the header in the plan exactly as the log writes it, or the column's place as in #3."),
     /** A planned column stands twice. */
     COLUMN_TWICE(
             Severity.BLOCKS,
@@ -114,6 +134,56 @@ public enum FindingKind {
             "{channel} may have left saturation from {from} to {to} ({kind}), at worst {worst} K against a tolerance of"
                     + " {tolerance} K, within its uncertainty.",
             "These sensors cannot tell; a person has to judge the run."),
+    /** Lines behind the last sample. */
+    LINES_BEHIND(
+            Severity.NOTE,
+            "{lines} lines behind the last sample are no samples; the first: {reason}.",
+            "Nothing, if the logger ends its logs with a summary; otherwise look at these lines."),
+    /** Something of the log's form was assumed. */
+    FORM_ASSUMED(
+            Severity.REVIEW,
+            "The {what} of the log was assumed to be {value}: {evidence}.",
+            "Check that the values are plausible, and say it in the plan under reading."),
+    /** A header that differs a little from the plan's. */
+    COLUMN_ALIKE(
+            Severity.NOTE,
+            "The plan's channel {channel} names the column \"{column}\", the log \"{header}\"; no other is alike.",
+            "Write the header in the plan as the log writes it."),
+    /** The header stands again among the samples. */
+    HEADER_REPEATED(
+            Severity.NOTE, "The header stands {times} more times among the samples; it was passed over.", "Nothing."),
+    /** Codes in place of samples. */
+    FAULT_CODES(
+            Severity.REVIEW,
+            "{samples} samples of {channel} are codes or impossible values and count as missing: {codes}.",
+            "Look for an open or overranged sensor."),
+    /** A channel that is read less often than rows are written. */
+    VALUES_HELD(
+            Severity.NOTE,
+            "{channel} is read every {every} rows; the values repeated in between are no samples.",
+            "Check that the plan's longest gap suits this channel."),
+    /** Rows that stand twice. */
+    ROWS_DOUBLED(
+            Severity.NOTE,
+            "{rows} rows repeat time and values of the row before; they were passed over.",
+            "Nothing, if the logger is known to do so."),
+    /** Several rows under one time. */
+    STAMPS_SPREAD(
+            Severity.REVIEW,
+            "{rows} rows share the time of the row before; they were spread evenly up to the next time.",
+            "Let the logger write its times with seconds."),
+    /** A clock that went back. */
+    CLOCK_JUMP(
+            Severity.BLOCKS,
+            "The log's clock goes back by {back} s; how much time really passed is not known, later times run on from the"
+                    + " row before.",
+            "If it is one hour at the end of summer time, enter the zone in the run sheet; otherwise a person has to judge"
+                    + " the run."),
+    /** A clock that followed summer time. */
+    CLOCK_SUMMER_TIME(
+            Severity.NOTE,
+            "The log's clock changed by one hour for summer time in the zone {zone}; the time base runs on.",
+            "Nothing; times behind the change are shown by the clock before it."),
     /** Columns that nobody asked for. */
     COLUMNS_UNREAD(
             Severity.NOTE,
@@ -124,6 +194,11 @@ public enum FindingKind {
             Severity.BLOCKS,
             "The calibration of {channel} (certificate {certificate}) was due on {due}; the run is of {date}.",
             "Have the sensor checked; a person has to judge the run by what that check finds."),
+    /** Whether calibration was due can't be told. */
+    DATE_UNKNOWN(
+            Severity.REVIEW,
+            "The log tells no date, so whether the calibration of {channel} was due is not known.",
+            "Compare the date of the run with the due date."),
     /** The plan has not been put in force. */
     PLAN_IS_DRAFT(
             Severity.NOTE,

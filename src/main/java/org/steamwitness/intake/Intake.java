@@ -14,8 +14,11 @@ public sealed interface Intake {
      * @param trace its samples
      * @param reading how it was read and what was refused
      * @param findings what the reader must know about that
+     * @param guesses how the log's form came to be known
+     * @param columns all columns of the log
      */
-    record Read(Trace trace, Reading reading, List<Finding> findings) implements Intake {}
+    record Read(Trace trace, Reading reading, List<Finding> findings, List<Guess> guesses, List<FoundColumn> columns)
+            implements Intake {}
 
     /**
      * It can't be evaluated.

@@ -4,83 +4,161 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
-import org.apache.commons.csv.CSVRecord;
-import org.steamwitness.trace.Channel;
-import org.steamwitness.trace.Column;
-import org.steamwitness.trace.LogClock;
-import org.steamwitness.trace.Reading;
-import org.steamwitness.trace.Reading.RefusedRows;
-import org.steamwitness.trace.ReadingRules;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
-import org.steamwitness.trace.Trace;
 
-/** Grows columns row by row while a log is read, and keeps account of what had to be refused. */
+/** Grows columns row by row while a log is read. Nothing of a row is kept but its numbers, its time and its line. */
 final class Samples {
 
-    private static final String WHOLE_ROW = "whole row";
-
     private final List<ColumnRule> rules;
-    private final List<String> headers;
     private final int[] fields;
     private final double[][] values;
-    private final List<RefusedRows> refusals = new ArrayList<>();
-    private double[] seconds = new double[4096];
-    private int[] lines = new int[4096];
+    private final List<FaultCodes> codes = new ArrayList<>();
+    private final NumberText numbers;
+    private final java.util.Set<String> missingCodes;
+    private final TimeReader time;
+    private final Refusals refusals;
+    private long[] nanos;
+    private int[] lines;
     private int rows;
-    private int refusedRows;
-    private TimeText first;
 
-    Samples(ReadingRules wanted, List<String> headers) {
-        this.rules = wanted.columns();
-        this.headers = headers;
-        this.fields = rules.stream()
-                .mapToInt(rule -> headers.lastIndexOf(rule.header()))
-                .toArray();
-        this.values = new double[rules.size()][4096];
+    /**
+     * Prepares columns.
+     *
+     * @param rules the wanted columns
+     * @param fields the field of each
+     * @param form how the log is written
+     * @param missingCodes texts that the plan names as missing samples
+     * @param expectedRows how many rows there will be, roughly
+     * @param refusals keeps account of what can't be read
+     */
+    Samples(
+            List<ColumnRule> rules,
+            int[] fields,
+            LogForm form,
+            java.util.Set<String> missingCodes,
+            int expectedRows,
+            Refusals refusals) {
+        this.rules = rules;
+        this.fields = fields.clone();
+        this.values = new double[rules.size()][expectedRows];
+        this.nanos = new long[expectedRows];
+        this.lines = new int[expectedRows];
+        this.numbers = new NumberText(form.numbers());
+        this.missingCodes = missingCodes;
+        this.time = new TimeReader(form.timeForm(), form.numbers());
+        this.refusals = refusals;
+        rules.forEach(rule -> codes.add(new FaultCodes(rule)));
     }
 
-    void add(CSVRecord row, int line) {
-        if (row.size() != headers.size()) {
-            refuseRow(line, "it has " + row.size() + " fields where the header has " + headers.size());
-            return;
+    TimeReader time() {
+        return time;
+    }
+
+    /** Appends a row whose time has been read. */
+    void append(RowFields row, int line, long at) {
+        if (rows == nanos.length) {
+            int more = rows + rows / 2 + 16;
+            nanos = Arrays.copyOf(nanos, more);
+            lines = Arrays.copyOf(lines, more);
+            for (int c = 0; c < values.length; c++) {
+                values[c] = Arrays.copyOf(values[c], more);
+            }
         }
-        Optional<TimeText> time = TimeText.read(row.get(0));
-        if (time.isEmpty()) {
-            refuseRow(line, "its time \"" + shortened(row.get(0)) + "\" is not ISO 8601, as 2026-03-14T08:05:00");
-            return;
+        nanos[rows] = at;
+        lines[rows] = line;
+        for (int c = 0; c < values.length; c++) {
+            values[c][rows] = value(c, row.get(fields[c]), line);
         }
-        if (first != null && !time.get().writtenLike(first)) {
-            refuseRow(line, "its time is written otherwise than the first, with or without distance from UTC");
-            return;
+        rows++;
+    }
+
+    private double value(int channel, String text, int line) {
+        double number = numbers.read(text);
+        if (!Double.isNaN(number) && missingCodes.isEmpty()) {
+            double value = rules.get(channel).toSi().applyAsDouble(number);
+            if (codes.get(channel).possible(value)) {
+                return value;
+            }
         }
-        double instant = first == null ? 0 : time.get().secondsAfter(first);
-        if (rows > 0 && !(instant > seconds[rows - 1])) {
-            refuseRow(line, "its time does not come after the row before");
-            return;
+        return odd(channel, text, number, line);
+    }
+
+    /** What is no plain measurement: empty, a code, or no number at all. */
+    private double odd(int channel, String text, double number, int line) {
+        String plain = text.strip();
+        if (plain.isEmpty() || plain.equals("\"\"")) {
+            return Double.NaN;
         }
-        if (first == null) {
-            first = time.get();
+        if (missingCodes.contains(plain) || MissingText.is(plain)) {
+            codes.get(channel).count(text);
+            return Double.NaN;
         }
-        append(row, line, instant);
+        if (Double.isNaN(number)) {
+            String held =
+                    plain.indexOf('\0') >= 0 ? "a text with NUL characters" : "\"" + FieldText.shortened(plain) + "\"";
+            refusals.field(line, rules.get(channel).header(), held + " is not a number, the sample is missing");
+            return Double.NaN;
+        }
+        double value = rules.get(channel).toSi().applyAsDouble(number);
+        if (codes.get(channel).possible(value)) {
+            return value;
+        }
+        codes.get(channel).count(text);
+        return Double.NaN;
+    }
+
+    /** Refuses a row whose time does not fit; its numbers are not used. */
+    void refuse(int row, String reason) {
+        refusals.row(lines[row], Refusals.Cause.ORDER, reason);
+    }
+
+    /** Whether two rows hold the same numbers. */
+    boolean alike(int one, int other) {
+        for (double[] column : values) {
+            if (Double.compare(column[one], column[other]) != 0) {
+                return false;
+            }
+        }
+        return true;
     }
 
     int rows() {
         return rows;
     }
 
-    int refusedRows() {
-        return refusedRows;
+    /** Times of all rows; the array itself, for the time base to put in order. */
+    long[] nanos() {
+        return nanos;
     }
 
-    List<RefusedRows> refusals() {
-        return refusals;
+    boolean withOffset() {
+        return time.withOffset();
     }
 
-    Optional<RefusedRows> firstRefusal() {
-        return refusals.stream().findFirst();
+    int lineOf(int row) {
+        return lines[row];
     }
 
+    FaultCodes codes(int channel) {
+        return codes.get(channel);
+    }
+
+    /** The kept values of one channel; the channel's rows are given up. */
+    double[] take(int channel, int[] kept) {
+        double[] taken = taken(values[channel], kept);
+        values[channel] = new double[0];
+        return taken;
+    }
+
+    int[] takeLines(int[] kept) {
+        int[] taken = new int[kept.length];
+        for (int i = 0; i < kept.length; i++) {
+            taken[i] = lines[kept[i]];
+        }
+        return taken;
+    }
+
+    /** A channel without any value. */
     Optional<ColumnRule> emptyChannel() {
         for (int c = 0; c < rules.size(); c++) {
             if (Arrays.stream(values[c], 0, rows).allMatch(Double::isNaN)) {
@@ -90,78 +168,22 @@ final class Samples {
         return Optional.empty();
     }
 
-    Trace trace() {
-        List<Channel> channels = new ArrayList<>();
-        for (int c = 0; c < rules.size(); c++) {
-            channels.add(new Channel(rules.get(c), Column.of(Arrays.copyOf(values[c], rows))));
+    private static double[] taken(double[] all, int[] kept) {
+        if (kept.length == all.length) {
+            return all;
         }
-        return new Trace(
-                new LogClock(first.local(), first.offset()),
-                Column.of(Arrays.copyOf(seconds, rows)),
-                Arrays.copyOf(lines, rows),
-                channels);
+        double[] taken = new double[kept.length];
+        for (int i = 0; i < kept.length; i++) {
+            taken[i] = all[kept[i]];
+        }
+        return taken;
     }
 
-    Reading reading(String encoding, List<String> headerFields, List<String> unread) {
-        return new Reading(
-                encoding,
-                "comma",
-                "full stop",
-                first.format(),
-                List.of(String.join(",", headerFields)),
-                rows,
-                unread,
-                refusals);
-    }
+    /** The fields of one row. */
+    @FunctionalInterface
+    interface RowFields {
 
-    private void append(CSVRecord row, int line, double instant) {
-        if (rows == seconds.length) {
-            seconds = Arrays.copyOf(seconds, 2 * rows);
-            lines = Arrays.copyOf(lines, 2 * rows);
-            for (int c = 0; c < values.length; c++) {
-                values[c] = Arrays.copyOf(values[c], 2 * rows);
-            }
-        }
-        seconds[rows] = instant;
-        lines[rows] = line;
-        for (int c = 0; c < values.length; c++) {
-            values[c][rows] = value(rules.get(c), row.get(fields[c]), line);
-        }
-        rows++;
-    }
-
-    private double value(ColumnRule rule, String text, int line) {
-        if (text.isEmpty()) {
-            return Double.NaN;
-        }
-        OptionalDouble number = NumberText.read(text);
-        if (number.isEmpty()) {
-            fold(new RefusedRows(
-                    line,
-                    line,
-                    1,
-                    rule.header(),
-                    "\"" + shortened(text) + "\" is not a number, the sample is missing"));
-            return Double.NaN;
-        }
-        return rule.toSi().applyAsDouble(number.getAsDouble());
-    }
-
-    private void refuseRow(int line, String reason) {
-        refusedRows++;
-        fold(new RefusedRows(line, line, 1, WHOLE_ROW, reason));
-    }
-
-    private void fold(RefusedRows next) {
-        int last = refusals.size() - 1;
-        if (last >= 0 && refusals.get(last).continuedBy(next)) {
-            refusals.set(last, refusals.get(last).joinedWith(next));
-        } else {
-            refusals.add(next);
-        }
-    }
-
-    private static String shortened(String text) {
-        return text.length() <= 24 ? text : text.substring(0, 24) + "…";
+        /** One field, counted from zero. */
+        String get(int index);
     }
 }

@@ -69,16 +69,18 @@ final class Binding {
                 find(FindingKind.ENTRY_MISSING, Map.of("entry", entry));
             }
         }
-        LocalDate day = trace.clock().first().toLocalDate();
         for (PlannedChannel channel : plan.channels()) {
-            if (channel.due().filter(day::isAfter).isPresent()) {
+            Optional<LocalDate> day = trace.clock().date();
+            if (channel.due().isPresent() && day.isEmpty()) {
+                find(FindingKind.DATE_UNKNOWN, Map.of("channel", channel.name()));
+            } else if (channel.due().filter(day.orElse(LocalDate.MIN)::isAfter).isPresent()) {
                 find(
                         FindingKind.CALIBRATION_OVERDUE,
                         Map.of(
                                 "channel", channel.name(),
                                 "certificate", channel.certificate().orElse("not named"),
                                 "due", channel.due().orElseThrow().toString(),
-                                "date", day.toString()));
+                                "date", day.orElseThrow().toString()));
             }
         }
     }

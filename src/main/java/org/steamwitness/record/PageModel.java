@@ -51,7 +51,7 @@ final class PageModel {
 
     private Map<String, Object> run() {
         RunPart run = record.run();
-        String start = record.phases().get(0).startLocal();
+        String start = record.phases().get(0).startLocal().value().orElse("");
         Map<String, Object> map = new LinkedHashMap<>();
         map.put("run", run.run());
         map.put("equipment", run.equipment());
@@ -65,8 +65,13 @@ final class PageModel {
                 run.initialTemperature().printed(t -> Printed.fixed(t.valueCelsius(), 1) + " °C"));
         map.put("atmosphere", run.atmosphereKilopascal().printed(p -> Printed.fixed(p, 2) + " kPa"));
         map.put("zone", run.zone().printed(z -> z));
-        map.put("start", start.substring(0, 19).replace('T', ' '));
-        map.put("end", timeOfDay(record.phases().get(record.phases().size() - 1).endLocal()));
+        map.put(
+                "start",
+                start.isEmpty()
+                        ? "0 s"
+                        : start.substring(0, Math.min(19, start.length())).replace('T', ' '));
+        PhasePart last = record.phases().get(record.phases().size() - 1);
+        map.put("end", timeOfDay(last.endLocal(), last.endSeconds()));
         map.put("offset", start.length() > 19 ? " (UTC" + start.substring(19) + ")" : "");
         map.put("enteredBy", run.entered().by());
         map.put("enteredAt", run.entered().at());
@@ -281,8 +286,8 @@ final class PageModel {
                 .map(p -> Map.of(
                         "number", Integer.toString(p.index()),
                         "name", p.name(),
-                        "start", timeOfDay(p.startLocal()),
-                        "end", timeOfDay(p.endLocal()),
+                        "start", timeOfDay(p.startLocal(), p.startSeconds()),
+                        "end", timeOfDay(p.endLocal(), p.endSeconds()),
                         "duration", Printed.duration(p.durationSeconds()),
                         "foundBy", p.foundBy().equals("mark") ? "entered mark" : "trace",
                         "temperature",
@@ -296,8 +301,10 @@ final class PageModel {
                 .toList();
     }
 
-    private static String timeOfDay(String local) {
-        return local.substring(11, 19);
+    private static String timeOfDay(Given<String> local, double seconds) {
+        return local.value()
+                .map(l -> l.length() < 19 ? l : l.substring(11, 19))
+                .orElseGet(() -> Printed.duration(seconds));
     }
 
     private List<Map<String, String>> channels() {

@@ -37,8 +37,8 @@ final class PhaseParts {
                 Canonical.number(start),
                 Canonical.number(end),
                 Canonical.number(end - start),
-                evidence.trace().clock().localAt(start),
-                evidence.trace().clock().localAt(end),
+                local(start),
+                local(end),
                 phase.foundBy().word(),
                 mark(phase, start),
                 course(phase, evidence.bound().pressure(), Canonical::kilopascal),
@@ -94,5 +94,13 @@ final class PhaseParts {
                 unit.applyAsDouble(lowest),
                 unit.applyAsDouble(highest),
                 unit.applyAsDouble(sum / count)));
+    }
+
+    private Given<String> local(double seconds) {
+        return evidence.trace()
+                .clock()
+                .localAt(seconds)
+                .map(Given::of)
+                .orElseGet(() -> Given.withheld("the log tells the time since its start alone"));
     }
 }

@@ -79,7 +79,7 @@ public final class Evaluate {
                     new Position(sheetFile.name(), 0, 0, "zone"),
                     Map.of("what", "no time zone is named so; expected one such as Europe/Lisbon"))));
         }
-        Intake intake = new LogReader(log.name(), plan.readingRules(), progress).read(log.bytes());
+        Intake intake = new LogReader(log.name(), plan.readingRules(), zone, progress).read(log.bytes());
         if (intake instanceof Intake.Unreadable unreadable) {
             return new Outcome.Refused(unreadable.findings());
         }
