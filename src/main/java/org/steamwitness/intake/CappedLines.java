@@ -2,8 +2,8 @@ package org.steamwitness.intake;
 
 import java.io.IOException;
 import java.io.Reader;
-import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CopyOnWriteArrayList;
 
 /**
  * Text with a cap on the length of its lines: what goes beyond is dropped and the line is remembered, so that a line
@@ -17,7 +17,7 @@ final class CappedLines extends Reader {
 
     private final Reader text;
     private final boolean joinSpaces;
-    private final List<Integer> cut = new ArrayList<>();
+    private final List<Integer> cut = new CopyOnWriteArrayList<>();
     private int line = 1;
     private int length;
     private boolean afterReturn;
@@ -28,7 +28,7 @@ final class CappedLines extends Reader {
         this.joinSpaces = joinSpaces;
     }
 
-    /** Numbers of the lines that were cut, in order. */
+    /** Numbers of the lines that were cut, in order; may be asked by another thread. */
     List<Integer> cut() {
         return cut;
     }
@@ -46,10 +46,33 @@ final class CappedLines extends Reader {
         return kept;
     }
 
-    /** Lines are short as a rule: whole stretches between two line ends are passed at once. */
+    /** Lines are short as a rule: then nothing is dropped and the buffer stays as it was read. */
     private int capped(char[] buffer, int offset, int got) {
-        int kept = 0;
-        for (int i = offset; i < offset + got; i++) {
+        int end = offset + got;
+        int start = offset;
+        for (int i = offset; i < end; i++) {
+            char c = buffer[i];
+            if (c <= '\r' && (c == '\n' || c == '\r')) {
+                if (length + i - start > LONGEST) {
+                    return dropped(buffer, offset, start, end);
+                }
+                afterReturn = afterReturn && i == start;
+                ends(c);
+                start = i + 1;
+            }
+        }
+        if (length + end - start > LONGEST) {
+            return dropped(buffer, offset, start, end);
+        }
+        afterReturn = afterReturn && start == end;
+        length += end - start;
+        return got;
+    }
+
+    /** The same for a stretch that holds a line too long, from where that line goes on. */
+    private int dropped(char[] buffer, int offset, int from, int end) {
+        int kept = from - offset;
+        for (int i = from; i < end; i++) {
             char c = buffer[i];
             if (c == '\n' || c == '\r') {
                 ends(c);

@@ -107,6 +107,9 @@ record Encoding(Charset charset, String name, int skipped, String evidence) {
     private record Utf8(int sequences, int wrong, int firstWrong) {
 
         static Utf8 of(byte[] bytes) {
+            if (ascii(bytes)) {
+                return new Utf8(0, 0, -1);
+            }
             CharsetDecoder decoder = StandardCharsets.UTF_8
                     .newDecoder()
                     .onMalformedInput(CodingErrorAction.REPORT)
@@ -133,6 +136,14 @@ record Encoding(Charset charset, String name, int skipped, String evidence) {
                 more = !result.isUnderflow();
             }
             return new Utf8(sequences, wrong, firstWrong);
+        }
+
+        private static boolean ascii(byte[] bytes) {
+            int any = 0;
+            for (byte b : bytes) {
+                any |= b;
+            }
+            return any >= 0;
         }
     }
 }

@@ -33,6 +33,16 @@ final class FaultCodes {
         this.highest = temperature ? HIGHEST_KELVIN : HIGHEST_PASCAL;
     }
 
+    /** The lowest value in SI units that the sensor could have measured. */
+    double lowest() {
+        return lowest;
+    }
+
+    /** The highest such value. */
+    double highest() {
+        return highest;
+    }
+
     /** Whether a value in SI units is one that the sensor could have measured. */
     boolean possible(double value) {
         return value >= lowest && value <= highest;

@@ -99,12 +99,22 @@ final class FormFinder {
                 block.delimiter(),
                 numbers.form(),
                 block.width(),
+                meanRowBytes(lines, block),
                 block.lines().get(0),
                 header.lines(),
                 header.columns(),
                 known.columns(),
                 known.form(),
                 List.of(encoding, delimiter, numbers.guess(), header.guess(), known.guess())));
+    }
+
+    private double meanRowBytes(List<String> lines, Block block) {
+        boolean two = text.encoding().charset().name().startsWith("UTF-16");
+        double characters = block.lines().stream()
+                .mapToInt(line -> lines.get(line - 1).length() + 1)
+                .average()
+                .orElse(1);
+        return two ? 2 * characters : characters;
     }
 
     private List<Block> blocks(List<String> lines, int from, Optional<Delimiter> named) {

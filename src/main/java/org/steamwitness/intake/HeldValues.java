@@ -13,6 +13,12 @@ final class HeldValues {
     private static final int FEWEST_CHANGES = 20;
     private static final double REGULAR_SHARE = 0.97;
 
+    /** A channel that changes more often than in every second row is read in every row. */
+    private static final double LARGEST_CHANGING_SHARE = 0.55;
+
+    /** So many changes show already that there is no regular count. */
+    private static final int LOOKED_AT_FIRST = 500;
+
     private HeldValues() {}
 
     /** Rows from one reading of the channel to the next; 1 if it is read in every row. */
@@ -24,11 +30,12 @@ final class HeldValues {
                 changes[count++] = i;
             }
         }
-        if (count < FEWEST_CHANGES) {
+        if (count < FEWEST_CHANGES || count > LARGEST_CHANGING_SHARE * rows) {
             return 1;
         }
+        int first = Math.min(count, LOOKED_AT_FIRST);
         for (int every = MOST_ROWS; every > 1; every--) {
-            if (regular(changes, count, every) >= 0) {
+            if (regular(changes, first, every) >= 0 && regular(changes, count, every) >= 0) {
                 return every;
             }
         }

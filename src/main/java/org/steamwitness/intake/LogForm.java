@@ -11,6 +11,7 @@ import org.steamwitness.trace.TimeForm;
  * @param delimiter between fields
  * @param numbers how numbers are written
  * @param width fields of a row
+ * @param meanRowBytes mean length of the first rows
  * @param firstRowLine line of the first row of samples, as an editor counts
  * @param headerLines the lines of names and units, as written
  * @param columns all columns, those of the time among them
@@ -23,6 +24,7 @@ record LogForm(
         Delimiter delimiter,
         NumberForm numbers,
         int width,
+        double meanRowBytes,
         int firstRowLine,
         List<String> headerLines,
         List<FoundColumn> columns,

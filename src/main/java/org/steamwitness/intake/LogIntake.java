@@ -80,9 +80,10 @@ final class LogIntake {
                 trace, reading(choice.unread(), lines), List.copyOf(findings), form.guesses(), form.columns());
     }
 
-    /** One row a line, as a rule. */
+    /** As many as the mean length of the first rows lets expect, and a few more. */
     private int expectedRows() {
-        return text.lineFeeds() + 64;
+        long rows = 64 + (long) (text.length() / Math.max(1, form.meanRowBytes()) * 1.02);
+        return (int) Math.min(rows, text.length() / 2 + 64);
     }
 
     private Intake noRows() {

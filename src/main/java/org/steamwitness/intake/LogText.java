@@ -29,15 +29,6 @@ final class LogText {
         return bytes.length;
     }
 
-    /** How many line feeds there are. */
-    int lineFeeds() {
-        int ends = 0;
-        for (byte b : bytes) {
-            ends += b == '\n' ? 1 : 0;
-        }
-        return ends;
-    }
-
     /**
      * The text with capped lines, in which U+FFFD stands for bytes that the encoding does not know; with runs of spaces
      * made one tabulator if they delimit fields.

@@ -9,15 +9,20 @@ final class NumberText {
 
     private static final int LONGEST = 60;
 
+    /** So many digits make a whole number that a double holds exactly. */
+    private static final int MOST_DIGITS = 15;
+
     /** All powers of ten that a double holds exactly and that a mantissa of 15 digits can need. */
     private static final double[] POWERS = {
         1e0, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15
     };
 
     private final NumberForm form;
+    private final char decimal;
 
     NumberText(NumberForm form) {
         this.form = form;
+        this.decimal = form.decimal();
     }
 
     /**
@@ -28,29 +33,26 @@ final class NumberText {
      */
     double read(String text) {
         int length = text.length();
-        int start = length > 0 && text.charAt(0) == '-' ? 1 : 0;
+        if (length == 0 || length > MOST_DIGITS) {
+            return general(text);
+        }
+        int start = text.charAt(0) == '-' ? 1 : 0;
         long mantissa = 0;
-        int digits = 0;
-        int point = -1;
+        int point = length;
         for (int i = start; i < length; i++) {
-            char c = text.charAt(i);
-            if (c >= '0' && c <= '9') {
-                mantissa = mantissa * 10 + (c - '0');
-                digits++;
-            } else if (c == form.decimal() && point < 0 && digits > 0) {
+            int digit = text.charAt(i) - '0';
+            if (digit >= 0 && digit <= 9) {
+                mantissa = mantissa * 10 + digit;
+            } else if (digit + '0' == decimal && point == length && i > start) {
                 point = i;
             } else {
                 return general(text);
             }
-            if (digits > 15) {
-                return general(text);
-            }
         }
-        if (digits == 0) {
+        if (start == length) {
             return Double.NaN;
         }
-        int decimals = point < 0 ? 0 : length - point - 1;
-        double value = mantissa / POWERS[decimals];
+        double value = point == length ? mantissa : mantissa / POWERS[length - point - 1];
         return start == 1 ? -value : value;
     }
 

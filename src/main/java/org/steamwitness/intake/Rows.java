@@ -40,31 +40,44 @@ final class Rows {
         this.second = form.times().size() > 1 ? form.times().get(1) : -1;
     }
 
-    /** Walks over the log; false if nobody wants it any more. */
+    /**
+     * Walks over the log. Lines are cut into fields here, while another thread makes numbers of the rows cut before, in
+     * their order; the result is that of one thread.
+     *
+     * @return false if nobody wants it any more
+     */
     boolean read(Progress progress) {
         CappedLines lines = text.capped(form.delimiter() == Delimiter.SPACES);
-        try (CSVParser parser = CSVParser.parse(lines, quotedLineBreaks ? splitter.overLines() : splitter.byLine())) {
-            Iterator<CSVRecord> records = parser.iterator();
-            int seen = 0;
-            while (records.hasNext()) {
-                CSVRecord row = records.next();
-                int line = Math.toIntExact(parser.getCurrentLineNumber());
-                if (line >= form.firstRowLine()) {
-                    add(row, line, lines);
-                }
-                if (++seen % ROWS_BETWEEN_POLLS == 0) {
-                    progress.step("reading " + file, 0);
-                    if (progress.cancelled()) {
-                        return false;
-                    }
-                }
-            }
+        boolean wanted = true;
+        try (RowBelt belt = new RowBelt((row, line) -> add(row, line, lines));
+                CSVParser parser =
+                        CSVParser.parse(lines, quotedLineBreaks ? splitter.overLines() : splitter.byLine())) {
+            wanted = feed(parser, belt, progress);
         } catch (UncheckedIOException | IllegalStateException notClosed) {
             refusals.row(Integer.MAX_VALUE, Cause.QUOTE, "a quotation mark is not closed before the end of the log");
         } catch (IOException impossibleInMemory) {
             throw new UncheckedIOException(impossibleInMemory);
         }
-        return !progress.cancelled();
+        return wanted && !progress.cancelled();
+    }
+
+    private boolean feed(CSVParser parser, RowBelt belt, Progress progress) {
+        Iterator<CSVRecord> records = parser.iterator();
+        int seen = 0;
+        while (records.hasNext()) {
+            CSVRecord row = records.next();
+            int line = Math.toIntExact(parser.getCurrentLineNumber());
+            if (line >= form.firstRowLine()) {
+                belt.put(row, line);
+            }
+            if (++seen % ROWS_BETWEEN_POLLS == 0) {
+                progress.step("reading " + file, 0);
+                if (progress.cancelled()) {
+                    return false;
+                }
+            }
+        }
+        return true;
     }
 
     int headersRepeated() {
@@ -80,8 +93,8 @@ final class Rows {
             long at = second < 0
                     ? samples.time().nanos(row.get(first))
                     : samples.time().nanos(row.get(first), row.get(second));
-            if (at != TimeReader.REFUSED && !lines.cut().contains(line)) {
-                samples.append(field -> unquoted(row.get(field)), line, at);
+            if (at != TimeReader.REFUSED && !cut(lines, line)) {
+                samples.append(row, line, at);
                 return;
             }
         }
@@ -90,7 +103,7 @@ final class Rows {
 
     /** A row that does not fit at first sight: too long, with quotation marks, a header, or wrong. */
     private void addOdd(CSVRecord row, int line, CappedLines lines) {
-        if (lines.cut().contains(line)) {
+        if (cut(lines, line)) {
             refusals.row(line, Cause.LENGTH, "it is longer than " + CappedLines.LONGEST + " characters");
             return;
         }
@@ -119,7 +132,7 @@ final class Rows {
                 ? samples.time().nanos(fields.get(first))
                 : samples.time().nanos(fields.get(first), fields.get(second));
         if (at != TimeReader.REFUSED) {
-            samples.append(fields::get, line, at);
+            samples.append(fields, line, at);
         } else if (repeatsHeader(fields)) {
             firstRepeated = headersRepeated == 0 ? line : firstRepeated;
             headersRepeated++;
@@ -161,9 +174,7 @@ final class Rows {
         return false;
     }
 
-    /** A field in quotation marks of its own, with no delimiter inside. */
-    private static String unquoted(String field) {
-        int last = field.length() - 1;
-        return last > 0 && field.charAt(0) == '"' && field.charAt(last) == '"' ? field.substring(1, last) : field;
+    private static boolean cut(CappedLines lines, int line) {
+        return !lines.cut().isEmpty() && lines.cut().contains(line);
     }
 }

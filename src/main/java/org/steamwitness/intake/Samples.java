@@ -4,6 +4,9 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import java.util.function.DoubleUnaryOperator;
+import org.apache.commons.csv.CSVRecord;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
 
 /** Grows columns row by row while a log is read. Nothing of a row is kept but its numbers, its time and its line. */
@@ -12,9 +15,12 @@ final class Samples {
     private final List<ColumnRule> rules;
     private final int[] fields;
     private final double[][] values;
+    private final DoubleUnaryOperator[] toSi;
+    private final double[] lowest;
+    private final double[] highest;
     private final List<FaultCodes> codes = new ArrayList<>();
     private final NumberText numbers;
-    private final java.util.Set<String> missingCodes;
+    private final Set<String> missingCodes;
     private final TimeReader time;
     private final Refusals refusals;
     private long[] nanos;
@@ -35,7 +41,7 @@ final class Samples {
             List<ColumnRule> rules,
             int[] fields,
             LogForm form,
-            java.util.Set<String> missingCodes,
+            Set<String> missingCodes,
             int expectedRows,
             Refusals refusals) {
         this.rules = rules;
@@ -47,7 +53,10 @@ final class Samples {
         this.missingCodes = missingCodes;
         this.time = new TimeReader(form.timeForm(), form.numbers());
         this.refusals = refusals;
+        this.toSi = rules.stream().map(ColumnRule::toSi).toArray(DoubleUnaryOperator[]::new);
         rules.forEach(rule -> codes.add(new FaultCodes(rule)));
+        this.lowest = codes.stream().mapToDouble(FaultCodes::lowest).toArray();
+        this.highest = codes.stream().mapToDouble(FaultCodes::highest).toArray();
     }
 
     TimeReader time() {
@@ -55,7 +64,30 @@ final class Samples {
     }
 
     /** Appends a row whose time has been read. */
-    void append(RowFields row, int line, long at) {
+    void append(List<String> row, int line, long at) {
+        room();
+        for (int c = 0; c < values.length; c++) {
+            values[c][rows] = value(c, row.get(fields[c]), line);
+        }
+        kept(line, at);
+    }
+
+    /** Appends a row as it was first split. */
+    void append(CSVRecord row, int line, long at) {
+        room();
+        for (int c = 0; c < values.length; c++) {
+            values[c][rows] = value(c, row.get(fields[c]), line);
+        }
+        kept(line, at);
+    }
+
+    private void kept(int line, long at) {
+        nanos[rows] = at;
+        lines[rows] = line;
+        rows++;
+    }
+
+    private void room() {
         if (rows == nanos.length) {
             int more = rows + rows / 2 + 16;
             nanos = Arrays.copyOf(nanos, more);
@@ -64,19 +96,13 @@ final class Samples {
                 values[c] = Arrays.copyOf(values[c], more);
             }
         }
-        nanos[rows] = at;
-        lines[rows] = line;
-        for (int c = 0; c < values.length; c++) {
-            values[c][rows] = value(c, row.get(fields[c]), line);
-        }
-        rows++;
     }
 
     private double value(int channel, String text, int line) {
         double number = numbers.read(text);
         if (!Double.isNaN(number) && missingCodes.isEmpty()) {
-            double value = rules.get(channel).toSi().applyAsDouble(number);
-            if (codes.get(channel).possible(value)) {
+            double value = toSi[channel].applyAsDouble(number);
+            if (value >= lowest[channel] && value <= highest[channel]) {
                 return value;
             }
         }
@@ -86,7 +112,11 @@ final class Samples {
     /** What is no plain measurement: empty, a code, or no number at all. */
     private double odd(int channel, String text, double number, int line) {
         String plain = text.strip();
-        if (plain.isEmpty() || plain.equals("\"\"")) {
+        int last = plain.length() - 1;
+        if (last > 0 && plain.charAt(0) == '"' && plain.charAt(last) == '"') {
+            return value(channel, plain.substring(1, last), line);
+        }
+        if (plain.isEmpty()) {
             return Double.NaN;
         }
         if (missingCodes.contains(plain) || MissingText.is(plain)) {
@@ -99,7 +129,7 @@ final class Samples {
             refusals.field(line, rules.get(channel).header(), held + " is not a number, the sample is missing");
             return Double.NaN;
         }
-        double value = rules.get(channel).toSi().applyAsDouble(number);
+        double value = toSi[channel].applyAsDouble(number);
         if (codes.get(channel).possible(value)) {
             return value;
         }
@@ -177,13 +207,5 @@ final class Samples {
             taken[i] = all[kept[i]];
         }
         return taken;
-    }
-
-    /** The fields of one row. */
-    @FunctionalInterface
-    interface RowFields {
-
-        /** One field, counted from zero. */
-        String get(int index);
     }
 }
