@@ -1,0 +1,56 @@
+package org.steamwitness.plan;
+
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.Map;
+import java.util.Set;
+import org.steamwitness.trace.Place;
+import org.steamwitness.trace.QuantityKind;
+
+/** What only the whole plan can tell. */
+final class PlanCheck {
+
+    private PlanCheck() {}
+
+    static void check(Section at, Plan plan) {
+        Set<String> names = new HashSet<>();
+        for (PlannedChannel channel : plan.channels()) {
+            if (!names.add(channel.name())) {
+                at.refuse("channels", "two channels are named \"" + channel.name() + "\"");
+            }
+            if (plan.decision().guarded() && channel.uncertainty().isEmpty()) {
+                at.refuse(
+                        "channels",
+                        "a guarded decision needs the uncertainty of channel \"" + channel.name()
+                                + "\"; state it, or decide by the simple rule");
+            }
+        }
+        Map<String, PlannedChannel> byName = new HashMap<>();
+        plan.channels().forEach(channel -> byName.put(channel.name(), channel));
+        for (String start : plan.hold().startChannels()) {
+            PlannedChannel channel = byName.get(start);
+            if (channel == null) {
+                at.refuse("hold", "starts.channels names \"" + start + "\", which is not among the channels");
+            } else if (channel.rule().kind() != QuantityKind.TEMPERATURE || channel.place() == Place.PRODUCT) {
+                at.refuse("hold", "starts.channels names \"" + start + "\"; expected a temperature in the chamber");
+            }
+        }
+        for (LethalityAim aim : plan.lethality()) {
+            for (String probe : aim.probes().names()) {
+                PlannedChannel channel = byName.get(probe);
+                if (channel == null || channel.rule().kind() != QuantityKind.TEMPERATURE) {
+                    at.refuse("lethality", "channels names \"" + probe + "\", which is no temperature channel");
+                }
+            }
+        }
+        long pressures = plan.channels().stream()
+                .filter(c -> c.rule().kind() == QuantityKind.PRESSURE && c.place() == Place.CHAMBER)
+                .count();
+        if (pressures > 1) {
+            at.refuse("channels", "two channels measure the chamber's pressure; expected one");
+        }
+        if (plan.medium().saturated() && plan.saturation().isEmpty()) {
+            at.refuse("saturation", "required key is missing: the medium is saturated steam");
+        }
+    }
+}

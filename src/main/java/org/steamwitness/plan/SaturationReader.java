@@ -1,0 +1,20 @@
+package org.steamwitness.plan;
+
+import org.steamwitness.quantity.QuantityText;
+
+/** Understands {@code saturation}. */
+final class SaturationReader {
+
+    private static final double DEFAULT_SHORTEST_SECONDS = 10;
+
+    private SaturationReader() {}
+
+    static SaturationTolerance saturation(Section at) {
+        Entry<Double> air =
+                at.need("air").parsed("a temperature difference such as 1.0 K", QuantityText::kelvinDifference);
+        Entry<Double> superheat =
+                at.need("superheat").parsed("a temperature difference such as 2.0 K", QuantityText::kelvinDifference);
+        Entry<Double> shortest = at.may("shortest").parsed("a duration such as 10 s", QuantityText::seconds);
+        return new SaturationTolerance(air.get(), superheat.get(), shortest.or(DEFAULT_SHORTEST_SECONDS));
+    }
+}
