@@ -119,6 +119,14 @@ final class Slot {
         }
     }
 
+    /** A list of sections that may be empty. */
+    <T> Entry<List<T>> anyNumber(Function<Section, T> reader) {
+        if (node instanceof SequenceNode sequence && sequence.getValue().isEmpty()) {
+            return Entry.of(List.of());
+        }
+        return list(slot -> slot.section(reader));
+    }
+
     <T> Entry<T> refused(String what) {
         owner.refuseAt(node, path, what);
         return Entry.broken();
