@@ -31,7 +31,8 @@ final class Binding {
     BoundPlan.Bound bound() {
         checkPapers();
         List<BoundChannel> channels = channels();
-        List<BoundChannel> start = plan.hold().startChannels().stream()
+        Hold hold = plan.hold().orElseThrow();
+        List<BoundChannel> start = hold.startChannels().stream()
                 .map(name -> channels.stream()
                         .filter(c -> c.name().equals(name))
                         .findFirst()
@@ -39,7 +40,7 @@ final class Binding {
                 .toList();
         BoundPlan boundPlan = new BoundPlan(
                 channels,
-                plan.hold(),
+                hold,
                 start,
                 plan.medium().saturated() ? plan.saturation() : Optional.empty(),
                 plan.lethality(),

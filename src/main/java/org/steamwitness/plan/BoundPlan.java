@@ -3,6 +3,7 @@ package org.steamwitness.plan;
 import java.util.List;
 import java.util.Optional;
 import org.steamwitness.finding.Finding;
+import org.steamwitness.trace.Place;
 import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.Trace;
 
@@ -52,7 +53,9 @@ public record BoundPlan(
      * @return its channel; empty if none is planned or it can't be made absolute
      */
     public Optional<BoundChannel> pressure() {
-        return channels.stream().filter(c -> c.kind() == QuantityKind.PRESSURE).findFirst();
+        return channels.stream()
+                .filter(c -> c.kind() == QuantityKind.PRESSURE && c.place() == Place.CHAMBER)
+                .findFirst();
     }
 
     /**

@@ -1,8 +1,10 @@
 package org.steamwitness.plan;
 
 import java.time.LocalDate;
+import java.util.List;
 import java.util.function.Function;
 import org.steamwitness.quantity.Datum;
+import org.steamwitness.quantity.PressureReading;
 import org.steamwitness.quantity.PressureUnit;
 import org.steamwitness.quantity.QuantityText;
 import org.steamwitness.quantity.TemperatureUnit;
@@ -34,6 +36,9 @@ final class ChannelReader {
                 at.may("uncertainty").section(section -> uncertainty(section, difference));
         Entry<PlannedChannel.Lag> lag =
                 pressure ? Entry.absent() : at.may("lag").section(ChannelReader::lag);
+        Entry<Boolean> required = at.may("required").either("yes", "no");
+        Entry<List<SensorCorrection>> corrections =
+                at.may("corrections").anyNumber(section -> correction(section, rule, difference));
         Place where = place.get();
         kind.get();
         return new PlannedChannel(
@@ -43,7 +48,28 @@ final class ChannelReader {
                 uncertainty.optional(),
                 lag.optional(),
                 certificate.optional(),
+                required.or(true),
+                corrections.or(List.of()),
                 due.optional());
+    }
+
+    private static SensorCorrection correction(
+            Section at, Entry<ColumnRule> rule, Function<String, Double> difference) {
+        ColumnRule channel = rule.get();
+        Entry<Double> reading = channel.kind() == QuantityKind.TEMPERATURE
+                ? at.need("at").parsed("a temperature such as 121.0 degC", QuantityText::kelvin)
+                : at.need("at").parsed("a pressure such as 2.0 bar(g)", text -> pascal(text, channel.datum()));
+        Entry<Double> add = at.need("add").parsed("a difference such as 0.1 K", difference);
+        return new SensorCorrection(reading.get(), add.get());
+    }
+
+    private static double pascal(String text, Datum datum) {
+        PressureReading reading = QuantityText.pressure(text);
+        if (reading.datum() != datum) {
+            throw new IllegalArgumentException(
+                    "\"" + text + "\" is not counted as the channel is; expected (" + datum.mark() + ")");
+        }
+        return reading.pascal();
     }
 
     private static Entry<ColumnRule> temperatureRule(Section at, Entry<String> name, Entry<String> column) {

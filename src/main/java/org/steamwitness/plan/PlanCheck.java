@@ -1,7 +1,9 @@
 package org.steamwitness.plan;
 
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import org.steamwitness.trace.Place;
@@ -27,12 +29,12 @@ final class PlanCheck {
         }
         Map<String, PlannedChannel> byName = new HashMap<>();
         plan.channels().forEach(channel -> byName.put(channel.name(), channel));
-        for (String start : plan.hold().startChannels()) {
-            PlannedChannel channel = byName.get(start);
-            if (channel == null) {
-                at.refuse("hold", "starts.channels names \"" + start + "\", which is not among the channels");
-            } else if (channel.rule().kind() != QuantityKind.TEMPERATURE || channel.place() == Place.PRODUCT) {
-                at.refuse("hold", "starts.channels names \"" + start + "\"; expected a temperature in the chamber");
+        plan.steps().forEach(step -> starts(at, step.hold(), byName));
+        plan.chamber().ifPresent(chamber -> chamber(at, chamber, byName));
+        if (plan.atmosphere() instanceof AtmosphereSource.Measured measured) {
+            PlannedChannel channel = byName.get(measured.name());
+            if (channel == null || channel.rule().kind() != QuantityKind.PRESSURE) {
+                at.refuse("atmosphere", "channel names \"" + measured.name() + "\", which is no pressure channel");
             }
         }
         for (LethalityAim aim : plan.lethality()) {
@@ -51,6 +53,29 @@ final class PlanCheck {
         }
         if (plan.medium().saturated() && plan.saturation().isEmpty()) {
             at.refuse("saturation", "required key is missing: the medium is saturated steam");
+        }
+    }
+
+    private static void starts(Section at, Hold hold, Map<String, PlannedChannel> byName) {
+        for (String start : hold.startChannels()) {
+            PlannedChannel channel = byName.get(start);
+            if (channel == null) {
+                at.refuse("hold", "starts.channels names \"" + start + "\", which is not among the channels");
+            } else if (channel.rule().kind() != QuantityKind.TEMPERATURE || channel.place() == Place.PRODUCT) {
+                at.refuse("hold", "starts.channels names \"" + start + "\"; expected a temperature in the chamber");
+            }
+        }
+    }
+
+    private static void chamber(Section at, Chamber chamber, Map<String, PlannedChannel> byName) {
+        List<String> names = new ArrayList<>();
+        chamber.metal().ifPresent(metal -> names.addAll(metal.channels()));
+        chamber.load().ifPresent(load -> names.addAll(load.channels()));
+        for (String name : names) {
+            PlannedChannel channel = byName.get(name);
+            if (channel == null || channel.rule().kind() != QuantityKind.TEMPERATURE) {
+                at.refuse("chamber", "temperature names \"" + name + "\", which is no temperature channel");
+            }
         }
     }
 }

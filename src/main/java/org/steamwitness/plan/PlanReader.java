@@ -23,9 +23,14 @@ final class PlanReader {
         Entry<String> equipment = at.need("equipment").text();
         Entry<CycleProcess> process = at.need("process").word(CycleProcess.class, CycleProcess::word);
         Entry<Medium> medium = at.need("medium").word(Medium.class, Medium::word);
-        Entry<AtmosphereSource> atmosphere = at.need("atmosphere").word(AtmosphereSource.class, AtmosphereSource::word);
+        Entry<AtmosphereSource> atmosphere = AtmosphereReader.source(at.need("atmosphere"));
+        Entry<Chamber> chamber = at.may("chamber").section(ChamberReader::chamber);
         Entry<List<PlannedChannel>> channels = at.need("channels").list(slot -> slot.section(ChannelReader::channel));
-        Entry<Hold> hold = at.need("hold").section(HoldReader::hold);
+        boolean holds = process.kept().map(CycleProcess::holds).orElse(true);
+        Entry<List<HoldStep>> steps = holds ? HoldReader.steps(at.need("hold")) : Entry.absent();
+        Entry<Sampling> sampling = at.may("sampling").section(PlanReader::sampling);
+        Entry<Boolean> marksDecide = at.may("marks-decide").either("yes", "no");
+        Entry<Double> markAgreement = at.may("mark-agreement").parsed("a duration such as 60 s", QuantityText::seconds);
         Entry<Double> longestGap = at.may("longest-gap").parsed("a duration such as 10 s", QuantityText::seconds);
         Entry<Double> scanDelay = at.may("scan-delay").parsed("a duration such as 2 s", QuantityText::seconds);
         Entry<SaturationTolerance> saturation = at.may("saturation").section(SaturationReader::saturation);
@@ -33,7 +38,6 @@ final class PlanReader {
         Entry<DecisionRule> decision = at.need("decision").section(DecisionReader::decision);
         Entry<Set<String>> required = at.may("run-sheet").section(PlanReader::requiredEntries);
         format.get();
-        atmosphere.get();
         Plan plan = new Plan(
                 id.get(),
                 title.get(),
@@ -43,12 +47,17 @@ final class PlanReader {
                 equipment.get(),
                 process.get(),
                 medium.get(),
+                atmosphere.get(),
+                chamber.optional(),
                 channels.get(),
-                hold.get(),
+                steps.or(List.of()),
+                sampling.optional(),
                 longestGap.or(DEFAULT_LONGEST_GAP_SECONDS),
                 scanDelay.or(0.0),
                 saturation.optional(),
                 lethality.or(List.of()),
+                marksDecide.or(true),
+                ChamberReader.number(markAgreement),
                 decision.get(),
                 required.or(Set.of()));
         PlanCheck.check(at, plan);
@@ -76,18 +85,9 @@ final class PlanReader {
         return new LinkedHashSet<>(keys.get());
     }
 
-    /** Where the pressure of the atmosphere comes from. */
-    private enum AtmosphereSource {
-        ENTERED("entered");
-
-        private final String word;
-
-        AtmosphereSource(String word) {
-            this.word = word;
-        }
-
-        String word() {
-            return word;
-        }
+    private static Sampling sampling(Section at) {
+        Entry<Double> hold = at.may("hold").parsed("a duration such as 5 s", QuantityText::seconds);
+        Entry<Double> elsewhere = at.may("elsewhere").parsed("a duration such as 10 s", QuantityText::seconds);
+        return new Sampling(ChamberReader.number(hold), ChamberReader.number(elsewhere));
     }
 }

@@ -1,5 +1,6 @@
 package org.steamwitness.plan;
 
+import java.util.List;
 import org.steamwitness.quantity.QuantityText;
 
 /** Understands {@code saturation}. */
@@ -15,6 +16,12 @@ final class SaturationReader {
         Entry<Double> superheat =
                 at.need("superheat").parsed("a temperature difference such as 2.0 K", QuantityText::kelvinDifference);
         Entry<Double> shortest = at.may("shortest").parsed("a duration such as 10 s", QuantityText::seconds);
-        return new SaturationTolerance(air.get(), superheat.get(), shortest.or(DEFAULT_SHORTEST_SECONDS));
+        Entry<List<PlannedPhase>> judged =
+                at.may("judged").list(slot -> slot.word(PlannedPhase.class, PlannedPhase::word));
+        return new SaturationTolerance(
+                air.get(),
+                superheat.get(),
+                shortest.or(DEFAULT_SHORTEST_SECONDS),
+                judged.or(List.of(PlannedPhase.HOLD)));
     }
 }

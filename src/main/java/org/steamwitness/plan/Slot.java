@@ -87,6 +87,21 @@ final class Slot {
                         .orElseThrow(() -> new IllegalArgumentException("\"" + text + "\" is not one of: " + known)));
     }
 
+    /** True for the first word, false for the second. */
+    Entry<Boolean> either(String yes, String no) {
+        return parsed("one of: " + yes + ", " + no, text -> {
+            if (!text.equals(yes) && !text.equals(no)) {
+                throw new IllegalArgumentException("\"" + text + "\" is not one of: " + yes + ", " + no);
+            }
+            return text.equals(yes);
+        });
+    }
+
+    /** A name, or a list of names. */
+    Entry<List<String>> oneOrMore() {
+        return isList() ? list(Slot::text) : parsed("a name or a list of names", List::of);
+    }
+
     <T> Entry<T> section(Function<Section, T> reader) {
         if (isEmpty()) {
             return Entry.absent();
