@@ -44,6 +44,7 @@ final class Binding {
                 start,
                 plan.medium().saturated() ? plan.saturation() : Optional.empty(),
                 plan.lethality(),
+                plan.limits(),
                 plan.decision(),
                 plan.longestGapSeconds(),
                 plan.scanDelaySeconds(),
@@ -69,6 +70,9 @@ final class Binding {
             if (!sheet.holds(entry)) {
                 find(FindingKind.ENTRY_MISSING, Map.of("entry", entry));
             }
+        }
+        for (String demand : UnjudgedDemands.of(plan, sheet)) {
+            find(FindingKind.DEMAND_NOT_JUDGED, Map.of("demand", demand));
         }
         LocalDate day = trace.clock().first().toLocalDate();
         for (PlannedChannel channel : plan.channels()) {

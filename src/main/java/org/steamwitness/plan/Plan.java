@@ -19,6 +19,7 @@ import org.steamwitness.trace.ReadingRules;
  * @param medium what heats the load
  * @param atmosphere where the pressure of the atmosphere comes from
  * @param chamber the chamber and what is in it
+ * @param reading how its logs are written
  * @param channels the channels it needs, in its own order
  * @param steps the holds it asks for, one after the other; empty if the process has none
  * @param sampling how often the log has to sample
@@ -26,6 +27,7 @@ import org.steamwitness.trace.ReadingRules;
  * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
  * @param saturation how far from saturation a probe may stand in the hold phase
  * @param lethality what it asks of product probes; may be empty
+ * @param limits what else it sets limits on; may be empty
  * @param marksDecide whether an entered mark goes before the boundary found in the log
  * @param markAgreementSeconds how far an entered mark and the found boundary may lie apart
  * @param decision how values are held against limits
@@ -42,6 +44,7 @@ public record Plan(
         Medium medium,
         AtmosphereSource atmosphere,
         Optional<Chamber> chamber,
+        Optional<ReadingSection> reading,
         List<PlannedChannel> channels,
         List<HoldStep> steps,
         Optional<Sampling> sampling,
@@ -49,6 +52,7 @@ public record Plan(
         double scanDelaySeconds,
         Optional<SaturationTolerance> saturation,
         List<LethalityAim> lethality,
+        List<Limit> limits,
         boolean marksDecide,
         OptionalDouble markAgreementSeconds,
         DecisionRule decision,

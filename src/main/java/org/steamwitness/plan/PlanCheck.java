@@ -15,12 +15,16 @@ final class PlanCheck {
     private PlanCheck() {}
 
     static void check(Section at, Plan plan) {
+        boolean guarded = plan.decision().guarded()
+                || plan.limits().stream()
+                        .flatMap(limit -> limit.decision().stream())
+                        .anyMatch(DecisionRule::guarded);
         Set<String> names = new HashSet<>();
         for (PlannedChannel channel : plan.channels()) {
             if (!names.add(channel.name())) {
                 at.refuse("channels", "two channels are named \"" + channel.name() + "\"");
             }
-            if (plan.decision().guarded() && channel.uncertainty().isEmpty()) {
+            if (guarded && channel.uncertainty().isEmpty()) {
                 at.refuse(
                         "channels",
                         "a guarded decision needs the uncertainty of channel \"" + channel.name()
@@ -30,6 +34,13 @@ final class PlanCheck {
         Map<String, PlannedChannel> byName = new HashMap<>();
         plan.channels().forEach(channel -> byName.put(channel.name(), channel));
         plan.steps().forEach(step -> starts(at, step.hold(), byName));
+        for (Limit limit : plan.limits()) {
+            limit.scope().channels().stream()
+                    .filter(name -> !names.contains(name))
+                    .forEach(name -> at.refuse(
+                            "limits",
+                            limit.what().word() + ".channels names \"" + name + "\", which is not among the channels"));
+        }
         plan.chamber().ifPresent(chamber -> chamber(at, chamber, byName));
         if (plan.atmosphere() instanceof AtmosphereSource.Measured measured) {
             PlannedChannel channel = byName.get(measured.name());

@@ -25,6 +25,7 @@ final class PlanReader {
         Entry<Medium> medium = at.need("medium").word(Medium.class, Medium::word);
         Entry<AtmosphereSource> atmosphere = AtmosphereReader.source(at.need("atmosphere"));
         Entry<Chamber> chamber = at.may("chamber").section(ChamberReader::chamber);
+        Entry<ReadingSection> reading = at.may("reading").section(ReadingSectionReader::reading);
         Entry<List<PlannedChannel>> channels = at.need("channels").list(slot -> slot.section(ChannelReader::channel));
         boolean holds = process.kept().map(CycleProcess::holds).orElse(true);
         Entry<List<HoldStep>> steps = holds ? HoldReader.steps(at.need("hold")) : Entry.absent();
@@ -35,6 +36,7 @@ final class PlanReader {
         Entry<Double> scanDelay = at.may("scan-delay").parsed("a duration such as 2 s", QuantityText::seconds);
         Entry<SaturationTolerance> saturation = at.may("saturation").section(SaturationReader::saturation);
         Entry<List<LethalityAim>> lethality = at.may("lethality").list(slot -> slot.section(LethalityReader::aim));
+        Entry<List<Limit>> limits = at.may("limits").anyNumber(LimitReader::limit);
         Entry<DecisionRule> decision = at.need("decision").section(DecisionReader::decision);
         Entry<Set<String>> required = at.may("run-sheet").section(PlanReader::requiredEntries);
         format.get();
@@ -49,6 +51,7 @@ final class PlanReader {
                 medium.get(),
                 atmosphere.get(),
                 chamber.optional(),
+                reading.optional(),
                 channels.get(),
                 steps.or(List.of()),
                 sampling.optional(),
@@ -56,6 +59,7 @@ final class PlanReader {
                 scanDelay.or(0.0),
                 saturation.optional(),
                 lethality.or(List.of()),
+                limits.or(List.of()),
                 marksDecide.or(true),
                 ChamberReader.number(markAgreement),
                 decision.get(),

@@ -139,6 +139,142 @@ class PlanLanguageTest {
         assertThat(messages(read(FULL.replace(from, to)))).containsExactly(message);
     }
 
+    @Test
+    void namesWhatItDoesNotJudge() {
+        Plan plan =
+                read(FULL.replace("process: retort", "process: cooker")).value().orElseThrow();
+        RunSheet sheet = RunSheet.read("r.yaml", RunSheetReadingTest.FULL.getBytes(StandardCharsets.UTF_8))
+                .value()
+                .orElseThrow();
+        assertThat(UnjudgedDemands.of(plan, sheet))
+                .containsExactly(
+                        "process: cooker",
+                        "chamber.maximum-pressure",
+                        "atmosphere: altitude: 350 m",
+                        "corrections of channel pressure",
+                        "corrections of channel can-1",
+                        "hold steps after the first: 1",
+                        "hold.interruption: fails",
+                        "hold.equilibration",
+                        "hold.allowed-excursion",
+                        "sampling",
+                        "saturation.judged: heating, hold",
+                        "marks-decide: no",
+                        "mark-agreement",
+                        "log-part 08:05 to 10:10",
+                        "correction: start of hold moved to 08:28",
+                        "correction: channel can-1 left out");
+    }
+
+    /** Each row: a limit, and how it reads. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            what: initial-temperature, at-least: 60 degC                   | initial-temperature, at least 60 degC
+            what: time-to-steam-on, at-most: 15 min                        | time-to-steam-on, at most 15 min
+            'what: vent, any-of: [{time: 5 min, temperature: 107.2 degC}, {time: 7 min, temperature: 104.4 degC}]' | vent, 5 min at 107.2 degC or 7 min at 104.4 degC
+            what: come-up-time, at-least: 3 min, at-most: 12 min           | come-up-time, at least 3 min, at most 12 min
+            what: process-time, at-least: 42 min                           | process-time, at least 42 min
+            what: holding-time, at-most: 60 min                            | holding-time, at most 60 min
+            what: temperature, phase: hold, channels: [chamber], which: mean, at-most: 122 degC | temperature, hold, chamber, at most 122 degC
+            what: pressure, phase: cooling, at-least: 1.0 bar(g), at-most: 1.4 bar(g) | pressure, cooling, at least 1.0 bar(g), at most 1.4 bar(g)
+            'what: spread, places: [reference, product], phase: hold, at-most: 1.5 K, alert: 1.0 K' | spread, hold, reference, product, at most 1.5 K
+            what: recorder-against-indicating, at-most: 0.5 K              | recorder-against-indicating, at most 0.5 K
+            what: probe-against-reference, over: 1 min, at-most: 0.5 K     | probe-against-reference, at most 0.5 K
+            what: pulses, at-least: 4                                      | pulses, at least 4
+            what: pulses, at-most: 50 mbar(a)                              | pulses, at most 50 mbar(a)
+            what: equilibration, at-most: 15 s                             | equilibration, at most 15 s
+            what: temperature-rate, over: 1 min, at-most: 2 K/min          | temperature-rate, at most 2 K/min
+            what: pressure-rate, over: 30 s, phase: cooling, at-most: 0.3 bar/min | pressure-rate, cooling, at most 0.3 bar/min
+            what: overpressure, at-least: 0.2 bar                          | overpressure, at least 0.2 bar
+            what: saturation, phase: heating, at-most: 2 K                 | saturation, heating, at most 2 K
+            what: lethality, at-least: 6 min                               | lethality, at least 6 min
+            what: air-leakage, over: 10 min, at-most: 1.3 mbar/min         | air-leakage, at most 1.3 mbar/min
+            what: drying, at-least: 10 min                                 | drying, at least 10 min
+            what: drying, at-most: 60 mbar(a)                              | drying, at most 60 mbar(a)
+            what: cooling-end-temperature, at-most: 40 degC                | cooling-end-temperature, at most 40 degC
+            what: load-temperature-at-release, at-most: 80 degC            | load-temperature-at-release, at most 80 degC
+            what: flow, at-least: 120 kg/h                                 | flow, at least 120 kg/h
+            what: level, at-least: 150 mm                                  | level, at least 150 mm
+            what: rotation, at-least: 10 rpm                               | rotation, at least 10 rpm
+            what: total-time, at-most: 2 h                                 | total-time, at most 2 h
+            what: jacket-above-chamber, at-most: 2 K                       | jacket-above-chamber, at most 2 K
+            """)
+    void readsEveryLimit(String written, String words) {
+        Plan plan = read(FULL + "limits: [{" + written + ", source: TD-07, edition: 2}]\n")
+                .value()
+                .orElseThrow();
+        assertThat(plan.limits()).singleElement().satisfies(limit -> {
+            assertThat(limit.words()).isEqualTo(words);
+            assertThat(limit.source()).contains("TD-07");
+            assertThat(limit.edition()).contains("2");
+        });
+    }
+
+    /** Each row: a limit, and what is wrong with it. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            what: taste, at-least: 3                             | limits[0].what: "taste" is not one of: initial-temperature, *
+            what: spread                                         | limits[0]: a limit needs at-least, at-most or any-of
+            what: spread, at-most: 1.5 degC                      | limits[0].at-most: "1.5 degC": a difference of temperatures is written in kelvin, here 1.5 K; *
+            what: pressure, at-most: 2 bar                       | limits[0].at-most: "2 bar" does not say what it is counted from; *
+            what: pressure, at-least: 1 bar(g), at-most: 3 bar(a) | limits[0]: at-least and at-most must be counted from the same datum
+            what: come-up-time, at-least: 12 min, at-most: 3 min | limits[0]: at-least may not lie above at-most
+            what: pressure-rate, at-most: 0.3 bar/min            | limits[0].over: required key is missing: a rate needs its window, such as 30 s
+            what: level, over: 30 s, at-least: 150 mm            | limits[0].over: this limit has no window of time
+            'what: spread, any-of: [{time: 5 min, temperature: 107.2 degC}]' | limits[0].any-of: only the vent has ways of which any suffices
+            'what: vent, at-least: 5 min, any-of: [{time: 5 min, temperature: 107.2 degC}]' | limits[0]: any-of stands alone, without at-least and at-most
+            'what: spread, places: [reference], channels: [chamber], at-most: 1 K' | limits[0].channels: places are named too; expected one of both
+            'what: spread, channels: [drain], at-most: 1 K'      | limits: spread.channels names "drain", which is not among the channels
+            what: spread, which: most, at-most: 1 K              | limits[0].which: "most" is not one of: each, any, mean, end
+            what: pulses, at-least: four                         | limits[0].at-least: "four" is not a whole number such as 4
+            'what: spread, at-most: 1 K, decision: {rule: guarded, conformance: 95 %}' | channels: a guarded decision needs the uncertainty of channel "chamber"; *
+            """)
+    void namesMistakesOfLimits(String written, String message) {
+        String wanted =
+                "p.yaml:[0-9:]+ " + java.util.regex.Pattern.quote(message).replace("*", "\\E.*\\Q");
+        assertThat(messages(read(FULL + "limits: [{" + written + "}]\n"))).anyMatch(line -> line.matches(wanted));
+    }
+
+    static final String READING = """
+            reading: {encoding: windows-1252, delimiter: semicolon, decimal-mark: comma, thousands-mark: none,
+              header-line: 4, time-columns: [Date, Time], time-format: "dd.MM.yyyy HH:mm:ss", quoted-line-breaks: no,
+              missing-codes: ["---"], largest-refused-share: 1 %}
+            """;
+
+    @Test
+    void readsHowALogIsWritten() {
+        assertThat(read(FULL + READING).value().orElseThrow().reading())
+                .contains(new ReadingSection(
+                        Optional.of("windows-1252"),
+                        Optional.of("semicolon"),
+                        Optional.of("comma"),
+                        Optional.of("none"),
+                        Optional.of(4),
+                        List.of("Date", "Time"),
+                        Optional.of("dd.MM.yyyy HH:mm:ss"),
+                        Optional.of(false),
+                        List.of("---"),
+                        OptionalDouble.of(0.01)));
+        assertThat(messages(read(FULL + READING.replace("decimal-mark: comma", "decimal-mark: dot"))))
+                .containsExactly("p.yaml:34:71: reading.decimal-mark: \"dot\" is not one of: full stop, comma");
+        assertThat(messages(read(FULL + READING.replace("thousands-mark: none", "thousands-mark: comma"))))
+                .containsExactly("p.yaml:34:10: reading: decimal-mark and thousands-mark must differ");
+    }
+
+    @Test
+    void anOpenPlaceSaysWhatToFillIn() {
+        String text = FULL.replace("duration: 42 min", "duration: \"?\"")
+                .replace("status: in-force", "status: \"?\"")
+                .replace(
+                        "basis: {document: SP-114, edition: \"2026-02\", by: process authority, date: 2026-02-20}",
+                        "basis: \"?\"");
+        assertThat(messages(read(text)))
+                .containsExactly(
+                        "p.yaml:5:9: status: open place: fill in one of: draft, in-force",
+                        "p.yaml:6:8: basis: open place: fill in keys and values, one level deeper",
+                        "p.yaml:26:59: hold[0].duration: open place: fill in a duration such as 42 min");
+    }
+
     static List<String> messages(AsWritten<?> read) {
         return read.problems().stream()
                 .map(f -> f.position().text() + ": " + f.text())
