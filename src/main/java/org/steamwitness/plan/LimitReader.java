@@ -49,9 +49,8 @@ final class LimitReader {
         if (at.has("over") && !windowed) {
             return at.may("over").refused("this limit has no window of time");
         }
-        Set<Measure> rates = Set.of(Measure.TEMPERATURE_RATE, Measure.PRESSURE_RATE);
-        if (!at.has("over")
-                && what.kept().filter(k -> rates.containsAll(k.measures())).isPresent()) {
+        Set<LimitKind> rates = Set.of(LimitKind.TEMPERATURE_RATE, LimitKind.PRESSURE_RATE);
+        if (!at.has("over") && what.kept().filter(rates::contains).isPresent()) {
             at.refuse("over", "required key is missing: a rate needs its window, such as 30 s");
             return Entry.broken();
         }
