@@ -32,8 +32,9 @@ final class ChannelReader {
         Entry<ColumnRule> rule = pressure ? pressureRule(at, name, column) : temperatureRule(at, name, column);
         Function<String, Double> difference =
                 pressure ? QuantityText::pascalDifference : QuantityText::kelvinDifference;
-        Entry<PlannedChannel.StatedUncertainty> uncertainty =
-                at.may("uncertainty").section(section -> uncertainty(section, difference));
+        Entry<PlannedChannel.StatedUncertainty> uncertainty = at.may("uncertainty")
+                .section(section -> uncertainty(
+                        section, pressure ? "a quantity such as 0.02 bar" : "a quantity such as 0.2 K", difference));
         Entry<PlannedChannel.Lag> lag =
                 pressure ? Entry.absent() : at.may("lag").section(ChannelReader::lag);
         Entry<Boolean> required = at.may("required").either("yes", "no");
@@ -111,10 +112,11 @@ final class ChannelReader {
         return true;
     }
 
-    private static PlannedChannel.StatedUncertainty uncertainty(Section at, Function<String, Double> difference) {
-        Entry<Double> calibration = at.need("calibration").parsed("a quantity such as 0.2 K", difference);
-        Entry<Double> drift = at.may("drift").parsed("a quantity such as 0.1 K", difference);
-        Entry<Double> shared = at.may("shared").parsed("a quantity such as 0.1 K", difference);
+    private static PlannedChannel.StatedUncertainty uncertainty(
+            Section at, String expected, Function<String, Double> difference) {
+        Entry<Double> calibration = at.need("calibration").parsed(expected, difference);
+        Entry<Double> drift = at.may("drift").parsed(expected, difference);
+        Entry<Double> shared = at.may("shared").parsed(expected, difference);
         Entry<Double> coverage = at.need("coverage").parsed("a number such as 2", ChannelReader::coverage);
         return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), shared.or(0.0), coverage.get());
     }

@@ -29,7 +29,7 @@ class PlanSchemaTest {
               - {what: pulses, at-least: 4}
               - {what: air-leakage, at-most: 1.3 mbar/min, decision: {rule: simple}}
             """;
-    private static final Schema PLAN = schema("plan-1");
+    static final Schema PLAN = schema("plan-1");
     private static final Schema SHEET = schema("run-1");
 
     @Test
@@ -192,7 +192,7 @@ class PlanSchemaTest {
                 .getSchema(JSON.readTree(PlanSchemaTest.class.getResourceAsStream("schema/" + name + ".schema.json")));
     }
 
-    private static JsonNode tree(String yaml) {
+    static JsonNode tree(String yaml) {
         return JSON.valueToTree(new Load(LoadSettings.builder().build()).loadFromString(yaml));
     }
 
