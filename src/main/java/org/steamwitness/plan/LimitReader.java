@@ -13,7 +13,6 @@ final class LimitReader {
 
     static Limit limit(Section at) {
         Entry<LimitKind> what = at.need("what").word(LimitKind.class, LimitKind::word);
-        Entry<Limit.Scope> scope = scope(at, what);
         Optional<Measure> measure = measure(at, what);
         Entry<Limit.Figure> atLeast = figure(at.may("at-least"), measure);
         Entry<Limit.Figure> atMost = figure(at.may("at-most"), measure);
@@ -22,6 +21,7 @@ final class LimitReader {
         Entry<DecisionRule> decision = at.may("decision").section(DecisionReader::decision);
         Entry<String> source = at.may("source").text();
         Entry<String> edition = at.may("edition").text();
+        Entry<Limit.Scope> scope = scope(at, what);
         LimitKind kind = what.get();
         return new Limit(
                 kind,
