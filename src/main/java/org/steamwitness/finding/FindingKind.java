@@ -78,6 +78,15 @@ public enum FindingKind {
             "The run sheet names equipment {sheet}, the plan is for {plan}.",
             "Evaluate with the plan of the equipment that was used, or correct the run sheet."),
 
+    /** The plan describes a process that this version can't evaluate at all. */
+    PROCESS_NOT_EVALUATED(
+            Severity.BLOCKS,
+            "This version does not evaluate the process {process}.",
+            "Evaluate the run by hand, or with a version that does."),
+    /** The plan or the run sheet asks for something that this version does not judge. */
+    DEMAND_NOT_JUDGED(
+            Severity.BLOCKS, "This version does not judge what is asked for: {demand}.", "A person has to judge it."),
+
     // the record tells
     /** Rows that did not become samples. */
     ROWS_REFUSED(

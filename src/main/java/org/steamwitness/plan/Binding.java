@@ -31,7 +31,8 @@ final class Binding {
     BoundPlan.Bound bound() {
         checkPapers();
         List<BoundChannel> channels = channels();
-        List<BoundChannel> start = plan.hold().startChannels().stream()
+        Hold hold = plan.hold().orElseThrow();
+        List<BoundChannel> start = hold.startChannels().stream()
                 .map(name -> channels.stream()
                         .filter(c -> c.name().equals(name))
                         .findFirst()
@@ -39,10 +40,11 @@ final class Binding {
                 .toList();
         BoundPlan boundPlan = new BoundPlan(
                 channels,
-                plan.hold(),
+                hold,
                 start,
                 plan.medium().saturated() ? plan.saturation() : Optional.empty(),
                 plan.lethality(),
+                plan.limits(),
                 plan.decision(),
                 plan.longestGapSeconds(),
                 plan.scanDelaySeconds(),
@@ -68,6 +70,9 @@ final class Binding {
             if (!sheet.holds(entry)) {
                 find(FindingKind.ENTRY_MISSING, Map.of("entry", entry));
             }
+        }
+        for (String demand : UnjudgedDemands.of(plan, sheet)) {
+            find(FindingKind.DEMAND_NOT_JUDGED, Map.of("demand", demand));
         }
         for (PlannedChannel channel : plan.channels()) {
             Optional<LocalDate> day = trace.clock().date();

@@ -3,6 +3,7 @@ package org.steamwitness.plan;
 import java.util.List;
 import java.util.Optional;
 import org.steamwitness.finding.Finding;
+import org.steamwitness.trace.Place;
 import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.Trace;
 
@@ -14,6 +15,7 @@ import org.steamwitness.trace.Trace;
  * @param startChannels the channels that all have to be in the hold's band
  * @param saturation tolerances, where the medium is meant to stand at saturation
  * @param lethality lethality aims
+ * @param limits what else the plan sets limits on
  * @param decision how values are held against limits
  * @param longestGapSeconds longest time between two samples that a line may bridge
  * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
@@ -27,6 +29,7 @@ public record BoundPlan(
         List<BoundChannel> startChannels,
         Optional<SaturationTolerance> saturation,
         List<LethalityAim> lethality,
+        List<Limit> limits,
         DecisionRule decision,
         double longestGapSeconds,
         double scanDelaySeconds,
@@ -52,7 +55,9 @@ public record BoundPlan(
      * @return its channel; empty if none is planned or it can't be made absolute
      */
     public Optional<BoundChannel> pressure() {
-        return channels.stream().filter(c -> c.kind() == QuantityKind.PRESSURE).findFirst();
+        return channels.stream()
+                .filter(c -> c.kind() == QuantityKind.PRESSURE && c.place() == Place.CHAMBER)
+                .findFirst();
     }
 
     /**

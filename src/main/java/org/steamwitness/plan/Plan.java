@@ -2,6 +2,7 @@ package org.steamwitness.plan;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 import org.steamwitness.trace.ReadingRules;
 
@@ -16,12 +17,19 @@ import org.steamwitness.trace.ReadingRules;
  * @param equipment the chamber it is for
  * @param process what kind of cycle it describes
  * @param medium what heats the load
+ * @param atmosphere where the pressure of the atmosphere comes from
+ * @param chamber the chamber and what is in it
+ * @param reading how its logs are written
  * @param channels the channels it needs, in its own order
- * @param hold the hold it asks for
+ * @param steps the holds it asks for, one after the other; empty if the process has none
+ * @param sampling how often the log has to sample
  * @param longestGapSeconds longest time between two samples that a line may bridge
  * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
  * @param saturation how far from saturation a probe may stand in the hold phase
  * @param lethality what it asks of product probes; may be empty
+ * @param limits what else it sets limits on; may be empty
+ * @param marksDecide whether an entered mark goes before the boundary found in the log
+ * @param markAgreementSeconds how far an entered mark and the found boundary may lie apart
  * @param decision how values are held against limits
  * @param requiredEntries run sheet keys that have to be filled in
  */
@@ -34,12 +42,19 @@ public record Plan(
         String equipment,
         CycleProcess process,
         Medium medium,
+        AtmosphereSource atmosphere,
+        Optional<Chamber> chamber,
+        Optional<ReadingSection> reading,
         List<PlannedChannel> channels,
-        Hold hold,
+        List<HoldStep> steps,
+        Optional<Sampling> sampling,
         double longestGapSeconds,
         double scanDelaySeconds,
         Optional<SaturationTolerance> saturation,
         List<LethalityAim> lethality,
+        List<Limit> limits,
+        boolean marksDecide,
+        OptionalDouble markAgreementSeconds,
         DecisionRule decision,
         Set<String> requiredEntries) {
 
@@ -52,6 +67,15 @@ public record Plan(
      */
     public static AsWritten<Plan> read(String file, byte[] bytes) {
         return Document.read(file, bytes, PlanReader::plan);
+    }
+
+    /**
+     * The first hold it asks for.
+     *
+     * @return empty if the process has none
+     */
+    public Optional<Hold> hold() {
+        return steps.stream().findFirst().map(HoldStep::hold);
     }
 
     /**

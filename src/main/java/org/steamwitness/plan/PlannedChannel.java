@@ -1,6 +1,7 @@
 package org.steamwitness.plan;
 
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
 import org.steamwitness.trace.Place;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
@@ -14,6 +15,8 @@ import org.steamwitness.trace.ReadingRules.ColumnRule;
  * @param uncertainty what the plan states of its uncertainty
  * @param lag what the plan states of the sensor's lag
  * @param certificate the calibration certificate
+ * @param required whether a log without it can't be evaluated
+ * @param corrections what its calibration adds, by rising reading
  * @param due when the next calibration is due
  */
 public record PlannedChannel(
@@ -23,7 +26,32 @@ public record PlannedChannel(
         Optional<StatedUncertainty> uncertainty,
         Optional<Lag> lag,
         Optional<String> certificate,
+        boolean required,
+        List<SensorCorrection> corrections,
         Optional<LocalDate> due) {
+
+    /**
+     * Checks the corrections.
+     *
+     * @param rule name, column, quantity, unit and datum
+     * @param place where its sensor sits
+     * @param contact what touches the sensor
+     * @param uncertainty what the plan states of its uncertainty
+     * @param lag what the plan states of the sensor's lag
+     * @param certificate the calibration certificate
+     * @param required whether a log without it can't be evaluated
+     * @param corrections what its calibration adds
+     * @param due when the next calibration is due
+     * @throws IllegalArgumentException if the corrections do not rise
+     */
+    public PlannedChannel {
+        for (int i = 1; i < corrections.size(); i++) {
+            if (!(corrections.get(i).at() > corrections.get(i - 1).at())) {
+                throw new IllegalArgumentException("the corrections must stand in rising order of at");
+            }
+        }
+        corrections = List.copyOf(corrections);
+    }
 
     /**
      * The channel's name in plan and record.

@@ -13,13 +13,19 @@ import java.util.Set;
  * @param planId id of the plan that was used
  * @param planRevision its revision
  * @param equipment the chamber that was used
+ * @param logPart the part of the log that holds the run
  * @param zone time zone of the log's clock, such as "Europe/Lisbon"; not yet resolved
+ * @param clocks the log's clock against a trusted one
  * @param atmospherePascal absolute pressure of the atmosphere, as read beside the chamber
  * @param product what was processed
  * @param initialTemperature of the coldest container when steam came on
- * @param steamOn when steam was let in, by the log's clock
- * @param ventClosed when the vents were closed
- * @param steamOff when steam was shut off
+ * @param water water weighed before and after
+ * @param marks instants that were noted
+ * @param readings readings of the indicating instruments
+ * @param probes where probes were put
+ * @param indicators indicators that were read
+ * @param corrections what a person corrected
+ * @param events what happened
  * @param entered who entered all this and when
  */
 public record RunSheet(
@@ -27,13 +33,19 @@ public record RunSheet(
         String planId,
         int planRevision,
         String equipment,
+        Optional<LogPart> logPart,
         Optional<String> zone,
+        Optional<EnteredClocks> clocks,
         Optional<Double> atmospherePascal,
         Optional<Product> product,
         Optional<InitialTemperature> initialTemperature,
-        Optional<LocalTime> steamOn,
-        Optional<LocalTime> ventClosed,
-        Optional<LocalTime> steamOff,
+        Optional<WeighedWater> water,
+        EnteredMarks marks,
+        List<HandReading> readings,
+        List<PlacedProbe> probes,
+        List<Indicator> indicators,
+        List<Correction> corrections,
+        List<RunEvent> events,
         Entered entered) {
 
     /** The entries that a plan may require, as it names them. */
@@ -45,7 +57,13 @@ public record RunSheet(
             "initial-temperature",
             "marks.steam-on",
             "marks.vent-closed",
-            "marks.steam-off"));
+            "marks.timing-started",
+            "marks.steam-off",
+            "water",
+            "clocks",
+            "probes",
+            "readings",
+            "indicators"));
 
     /**
      * Reads a run sheet.
@@ -56,6 +74,33 @@ public record RunSheet(
      */
     public static AsWritten<RunSheet> read(String file, byte[] bytes) {
         return Document.read(file, bytes, RunSheetReader::runSheet);
+    }
+
+    /**
+     * When steam was let in.
+     *
+     * @return by the log's clock
+     */
+    public Optional<LocalTime> steamOn() {
+        return EnteredMarks.time(marks.steamOn());
+    }
+
+    /**
+     * When the vents were closed.
+     *
+     * @return by the log's clock
+     */
+    public Optional<LocalTime> ventClosed() {
+        return EnteredMarks.time(marks.ventClosed());
+    }
+
+    /**
+     * When steam was shut off.
+     *
+     * @return by the log's clock
+     */
+    public Optional<LocalTime> steamOff() {
+        return EnteredMarks.time(marks.steamOff());
     }
 
     /**
@@ -71,9 +116,15 @@ public record RunSheet(
             case "product" -> product.isPresent();
             case "lots" -> product.isPresent() && !product.get().lots().isEmpty();
             case "initial-temperature" -> initialTemperature.isPresent();
-            case "marks.steam-on" -> steamOn.isPresent();
-            case "marks.vent-closed" -> ventClosed.isPresent();
-            case "marks.steam-off" -> steamOff.isPresent();
+            case "marks.steam-on" -> steamOn().isPresent();
+            case "marks.vent-closed" -> ventClosed().isPresent();
+            case "marks.timing-started" -> marks.timingStarted().isPresent();
+            case "marks.steam-off" -> steamOff().isPresent();
+            case "water" -> water.isPresent();
+            case "clocks" -> clocks.isPresent();
+            case "probes" -> !probes.isEmpty();
+            case "readings" -> !readings.isEmpty();
+            case "indicators" -> !indicators.isEmpty();
             default -> throw new IllegalArgumentException("no run sheet entry: " + entry);
         };
     }

@@ -1,15 +1,12 @@
 package org.steamwitness.plan;
 
 import java.time.LocalTime;
-import java.time.OffsetDateTime;
 import java.util.List;
-import java.util.Optional;
+import org.steamwitness.quantity.AmountText;
 import org.steamwitness.quantity.QuantityText;
 
 /** Understands the keys of a run sheet. */
 final class RunSheetReader {
-
-    private static final String A_TIME = "a time of day such as 08:12 or 08:12:30";
 
     private RunSheetReader() {}
 
@@ -18,28 +15,41 @@ final class RunSheetReader {
         Entry<String> run = at.need("run").text();
         Entry<PlanUsed> planUsed = at.need("plan-used").section(RunSheetReader::planUsed);
         Entry<String> equipment = at.need("equipment").text();
+        Entry<LogPart> logPart = at.may("log-part").section(RunSheetReader::logPart);
+        Entry<EnteredClocks> clocks = at.may("clocks").section(RunSheetReader::clocks);
         Entry<String> zone = at.may("zone").text();
         Entry<Double> atmosphere =
                 at.may("atmosphere").parsed("a pressure such as 1008 hPa", QuantityText::atmospherePascal);
         Entry<RunSheet.Product> product = at.may("product").section(RunSheetReader::product);
         Entry<RunSheet.InitialTemperature> initial =
                 at.may("initial-temperature").section(RunSheetReader::initialTemperature);
-        Entry<Marks> marks = at.may("marks").section(RunSheetReader::marks);
+        Entry<WeighedWater> water = at.may("water").section(RunSheetReader::water);
+        Entry<EnteredMarks> marks = at.may("marks").section(MarksReader::marks);
+        Entry<List<HandReading>> readings = at.may("readings").anyNumber(HandReadingReader::reading);
+        Entry<List<PlacedProbe>> probes = at.may("probes").anyNumber(RunSheetReader::probe);
+        Entry<List<Indicator>> indicators = at.may("indicators").anyNumber(RunSheetReader::indicator);
+        Entry<List<Correction>> corrections = at.may("corrections").anyNumber(CorrectionReader::correction);
+        Entry<List<RunEvent>> events = at.may("events").anyNumber(RunSheetReader::event);
         Entry<RunSheet.Entered> entered = at.need("entered").section(RunSheetReader::entered);
         format.get();
-        Marks made = marks.or(Marks.NONE);
         return new RunSheet(
                 run.get(),
                 planUsed.get().id(),
                 planUsed.get().revision(),
                 equipment.get(),
+                logPart.optional(),
                 zone.optional(),
+                clocks.optional(),
                 atmosphere.optional(),
                 product.optional(),
                 initial.optional(),
-                made.steamOn(),
-                made.ventClosed(),
-                made.steamOff(),
+                water.optional(),
+                marks.or(EnteredMarks.NONE),
+                readings.or(List.of()),
+                probes.or(List.of()),
+                indicators.or(List.of()),
+                corrections.or(List.of()),
+                events.or(List.of()),
                 entered.get());
     }
 
@@ -61,30 +71,55 @@ final class RunSheetReader {
 
     private static RunSheet.InitialTemperature initialTemperature(Section at) {
         Entry<Double> value = at.need("value").parsed("a temperature such as 68.0 degC", QuantityText::kelvin);
-        Entry<LocalTime> time = at.may("at").parsed(A_TIME, LocalTime::parse);
+        Entry<LocalTime> time = at.may("at").parsed(MarksReader.A_TIME, LocalTime::parse);
         Entry<String> instrument = at.may("instrument").text();
         return new RunSheet.InitialTemperature(value.get(), time.optional(), instrument.optional());
     }
 
-    private static Marks marks(Section at) {
-        Entry<LocalTime> steamOn = at.may("steam-on").parsed(A_TIME, LocalTime::parse);
-        Entry<LocalTime> ventClosed = at.may("vent-closed").parsed(A_TIME, LocalTime::parse);
-        Entry<LocalTime> steamOff = at.may("steam-off").parsed(A_TIME, LocalTime::parse);
-        return new Marks(steamOn.optional(), ventClosed.optional(), steamOff.optional());
+    private static LogPart logPart(Section at) {
+        Entry<LocalTime> from = MarksReader.time(at.need("from"));
+        Entry<LocalTime> to = MarksReader.time(at.need("to"));
+        return new LogPart(from.get(), to.get());
+    }
+
+    private static EnteredClocks clocks(Section at) {
+        Entry<LocalTime> log = MarksReader.time(at.need("log"));
+        Entry<LocalTime> wall = MarksReader.time(at.need("wall"));
+        return new EnteredClocks(log.get(), wall.get());
+    }
+
+    private static WeighedWater water(Section at) {
+        Entry<Double> before = at.may("before").parsed("a mass such as 1.20 kg", AmountText::massKilogram);
+        Entry<Double> after = at.may("after").parsed("a mass such as 0.93 kg", AmountText::massKilogram);
+        return new WeighedWater(before.optional(), after.optional());
+    }
+
+    private static PlacedProbe probe(Section at) {
+        Entry<String> channel = at.need("channel").text();
+        Entry<String> serial = at.may("serial").text();
+        Entry<String> position = at.may("position").text();
+        return new PlacedProbe(channel.get(), serial.optional(), position.optional());
+    }
+
+    private static Indicator indicator(Section at) {
+        Entry<String> kind = at.need("kind").text();
+        Entry<String> lot = at.need("lot").text();
+        Entry<String> result = at.need("result").text();
+        Entry<String> readBy = at.need("read-by").text();
+        return new Indicator(kind.get(), lot.get(), result.get(), readBy.get());
+    }
+
+    private static RunEvent event(Section at) {
+        Entry<LocalTime> time = MarksReader.time(at.need("at"));
+        Entry<String> what = at.need("what").text();
+        return new RunEvent(time.get(), what.get());
     }
 
     private static RunSheet.Entered entered(Section at) {
         Entry<String> by = at.need("by").text();
-        Entry<OffsetDateTime> time =
-                at.need("at").parsed("a time such as 2026-03-14T10:31+00:00", OffsetDateTime::parse);
-        Entry<String> written = at.need("at").text();
-        time.get();
-        return new RunSheet.Entered(by.get(), written.get());
+        Entry<String> time = CorrectionReader.instant(at.need("at"));
+        return new RunSheet.Entered(by.get(), time.get());
     }
 
     private record PlanUsed(String id, int revision) {}
-
-    private record Marks(Optional<LocalTime> steamOn, Optional<LocalTime> ventClosed, Optional<LocalTime> steamOff) {
-        static final Marks NONE = new Marks(Optional.empty(), Optional.empty(), Optional.empty());
-    }
 }

@@ -15,6 +15,9 @@ import org.snakeyaml.engine.v2.nodes.Tag;
 /** The value under one key, not yet understood. Each way to understand it reports what it has to refuse. */
 final class Slot {
 
+    /** Stands in a draft where a person has to fill in a value. */
+    static final String OPEN = "?";
+
     private final Document document;
     private final Section owner;
     private final String path;
@@ -29,6 +32,10 @@ final class Slot {
 
     boolean isEmpty() {
         return node == null;
+    }
+
+    private boolean isOpen() {
+        return node instanceof ScalarNode scalar && scalar.getValue().equals(OPEN);
     }
 
     boolean isSection() {
@@ -55,6 +62,9 @@ final class Slot {
         if (scalar.getTag().equals(Tag.NULL) || scalar.getValue().isBlank()) {
             return refused("is empty; expected " + expected);
         }
+        if (scalar.getValue().equals(OPEN)) {
+            return refused("open place: fill in " + expected);
+        }
         try {
             return Entry.of(parser.apply(scalar.getValue()));
         } catch (DateTimeException notATime) {
@@ -63,6 +73,16 @@ final class Slot {
             return refused("\"" + scalar.getValue() + "\" is not " + expected);
         } catch (IllegalArgumentException wrong) {
             return refused(wrong.getMessage());
+        }
+    }
+
+    /** Whether the text could be read as such a figure; reports nothing. */
+    boolean reads(Measure measure) {
+        try {
+            return node instanceof ScalarNode scalar
+                    && !measure.figure(scalar.getValue()).written().isEmpty();
+        } catch (IllegalArgumentException other) {
+            return false;
         }
     }
 
@@ -87,12 +107,39 @@ final class Slot {
                         .orElseThrow(() -> new IllegalArgumentException("\"" + text + "\" is not one of: " + known)));
     }
 
+    /** One of a few words. */
+    Entry<String> oneOf(List<String> words) {
+        String known = String.join(", ", words);
+        return parsed("one of: " + known, text -> {
+            if (!words.contains(text)) {
+                throw new IllegalArgumentException("\"" + text + "\" is not one of: " + known);
+            }
+            return text;
+        });
+    }
+
+    /** True for the first word, false for the second. */
+    Entry<Boolean> either(String yes, String no) {
+        Entry<String> word = oneOf(List.of(yes, no));
+        if (isEmpty()) {
+            return Entry.absent();
+        }
+        return word.kept().map(text -> Entry.of(text.equals(yes))).orElseGet(Entry::broken);
+    }
+
+    /** A name, or a list of names. */
+    Entry<List<String>> oneOrMore() {
+        return isList() ? list(Slot::text) : parsed("a name or a list of names", List::of);
+    }
+
     <T> Entry<T> section(Function<Section, T> reader) {
         if (isEmpty()) {
             return Entry.absent();
         }
         if (!(node instanceof MappingNode mapping)) {
-            return refused("expected keys and values, one level deeper");
+            return isOpen()
+                    ? refused("open place: fill in keys and values, one level deeper")
+                    : refused("expected keys and values, one level deeper");
         }
         return new Section(document, mapping, path).read(reader);
     }
@@ -103,7 +150,7 @@ final class Slot {
             return Entry.absent();
         }
         if (!(node instanceof SequenceNode sequence)) {
-            return refused("expected a list");
+            return isOpen() ? refused("open place: fill in a list") : refused("expected a list");
         }
         if (sequence.getValue().isEmpty()) {
             return refused("the list is empty; expected one entry or more");
@@ -117,6 +164,14 @@ final class Slot {
         } catch (Entry.IncompleteException reported) {
             return Entry.broken();
         }
+    }
+
+    /** A list of sections that may be empty. */
+    <T> Entry<List<T>> anyNumber(Function<Section, T> reader) {
+        if (node instanceof SequenceNode sequence && sequence.getValue().isEmpty()) {
+            return Entry.of(List.of());
+        }
+        return list(slot -> slot.section(reader));
     }
 
     <T> Entry<T> refused(String what) {

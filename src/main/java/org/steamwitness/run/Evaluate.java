@@ -79,6 +79,12 @@ public final class Evaluate {
                     new Position(sheetFile.name(), 0, 0, "zone"),
                     Map.of("what", "no time zone is named so; expected one such as Europe/Lisbon"))));
         }
+        if (plan.hold().isEmpty()) {
+            return new Outcome.Refused(List.of(new Finding(
+                    FindingKind.PROCESS_NOT_EVALUATED,
+                    new Position(planFile.name(), 0, 0, "process"),
+                    Map.of("process", plan.process().word()))));
+        }
         Intake intake = new LogReader(log.name(), plan.readingRules(), zone, progress).read(log.bytes());
         if (intake instanceof Intake.Unreadable unreadable) {
             return new Outcome.Refused(unreadable.findings());

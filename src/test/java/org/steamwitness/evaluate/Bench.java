@@ -12,6 +12,7 @@ import org.steamwitness.plan.DecisionRule;
 import org.steamwitness.plan.Hold;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.plan.LethalityUnit;
+import org.steamwitness.plan.Limit;
 import org.steamwitness.plan.Marks;
 import org.steamwitness.plan.Plan;
 import org.steamwitness.plan.PlannedChannel;
@@ -30,6 +31,7 @@ public final class Bench {
     private List<BoundChannel> channels = List.of();
     private Hold hold = new Hold(121.1 + 273.15, 124.1 + 273.15, Optional.empty(), 60, List.of("chamber"));
     private List<LethalityAim> lethality = List.of();
+    private List<Limit> limits = List.of();
     private double longestGap = 10;
     private double scanDelay;
     private DecisionRule decision = new DecisionRule(true, 0.95);
@@ -88,6 +90,11 @@ public final class Bench {
 
     public Bench aiming(LethalityAim... aims) {
         lethality = List.of(aims);
+        return this;
+    }
+
+    public Bench limiting(Limit... set) {
+        limits = List.of(set);
         return this;
     }
 
@@ -165,6 +172,7 @@ public final class Bench {
                 channels.stream().filter(c -> c.name().equals("chamber")).toList(),
                 Optional.of(new SaturationTolerance(1, 2, 10)),
                 lethality,
+                limits,
                 decision,
                 longestGap,
                 scanDelay,

@@ -21,7 +21,15 @@ import tools.jackson.databind.json.JsonMapper;
 class PlanSchemaTest {
 
     private static final JsonMapper JSON = new JsonMapper();
-    private static final Schema PLAN = schema("plan-1");
+    private static final String LIMITS = """
+            limits:
+              - {what: vent, any-of: [{time: 5 min, temperature: 107.2 degC}], source: schedule}
+              - {what: spread, places: [reference, drain], phase: hold, at-most: 1.5 K, alert: 1.0 K}
+              - {what: pressure-rate, over: 30 s, phase: cooling, at-most: 0.3 bar/min}
+              - {what: pulses, at-least: 4}
+              - {what: air-leakage, at-most: 1.3 mbar/min, decision: {rule: simple}}
+            """;
+    static final Schema PLAN = schema("plan-1");
     private static final Schema SHEET = schema("run-1");
 
     @Test
@@ -41,6 +49,65 @@ class PlanSchemaTest {
         assertThat(plan.channels().get(1).lag()).contains(new PlannedChannel.Lag(6, 1));
         assertThat(plan.scanDelaySeconds()).isEqualTo(2);
         assertThat(PLAN.validate(tree(text))).isEmpty();
+    }
+
+    @Test
+    void everyEntryKeepsBothShapes() {
+        assertThat(PLAN.validate(tree(PlanLanguageTest.FULL + PlanLanguageTest.READING + LIMITS)))
+                .isEmpty();
+        assertThat(PlanLanguageTest.read(PlanLanguageTest.FULL + PlanLanguageTest.READING + LIMITS)
+                        .problems())
+                .isEmpty();
+        assertThat(SHEET.validate(tree(RunSheetReadingTest.FULL))).isEmpty();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            steam: supplied       | steam: bought
+            heat-loss: 28 W/K     | heat-loss: 28 W
+            material: stainless-steel | material: wood
+            '"altitude: 350 m"'   | '"altitude: 350"'
+            required: no          | required: perhaps
+            add: 0.1 K            | add: 0.1 degC
+            interruption: fails   | interruption: stops
+            'longest: 5 s, source: TD-1' | 'longest: 5 s'
+            marks-decide: no      | marks-decide: never
+            sampling: {hold: 5 s  | sampling: {hold: 5
+            judged: [heating      | judged: [boiling
+            decimal-mark: comma   | decimal-mark: dot
+            largest-refused-share: 1 % | largest-refused-share: 2
+            what: spread          | what: taste
+            at-most: 1.5 K        | at-most: 1.5 degC
+            'over: 30 s, '        | ''
+            at-most: 0.3 bar/min  | at-most: 0.3 bar
+            'at-least: 4}'        | 'at-least: four}'
+            'temperature: 107.2 degC}' | 'pressure: 1 bar(g)}'
+            process: retort       | process: leak-test
+            """)
+    void refusesBrokenEntriesAsTheProgramDoes(String from, String to) {
+        String whole = PlanLanguageTest.FULL + PlanLanguageTest.READING + LIMITS;
+        assertThat(whole).contains(from);
+        String text = whole.replace(from, to);
+        assertThat(PlanLanguageTest.read(text).problems()).isNotEmpty();
+        assertThat(PLAN.validate(tree(text))).isNotEmpty();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            wall: 08:13:05      | wall: noon
+            after: 930 g        | after: 930
+            'indicating: 121.6 degC, pressure: 1.07 bar(g)' | ''
+            'starts: 08:28'     | 'starts: 08:28, ends: 08:29'
+            'reason: slipped, ' | ''
+            'result: passed, '  | ''
+            """)
+    void refusesBrokenSheetEntriesAsTheProgramDoes(String from, String to) {
+        assertThat(RunSheetReadingTest.FULL).contains(from);
+        String text = RunSheetReadingTest.FULL.replace(from, to);
+        assertThat(RunSheet.read("r.yaml", text.getBytes(StandardCharsets.UTF_8))
+                        .problems())
+                .isNotEmpty();
+        assertThat(SHEET.validate(tree(text))).isNotEmpty();
     }
 
     @ParameterizedTest
@@ -125,7 +192,7 @@ class PlanSchemaTest {
                 .getSchema(JSON.readTree(PlanSchemaTest.class.getResourceAsStream("schema/" + name + ".schema.json")));
     }
 
-    private static JsonNode tree(String yaml) {
+    static JsonNode tree(String yaml) {
         return JSON.valueToTree(new Load(LoadSettings.builder().build()).loadFromString(yaml));
     }
 

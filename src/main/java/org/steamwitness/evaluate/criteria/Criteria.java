@@ -29,6 +29,7 @@ public final class Criteria {
         criteria.add(HoldingTime.of(plan, hold));
         SaturationAgreement.of(saturation, phases, plan.longestGapSeconds()).ifPresent(criteria::add);
         lethality.stream().map(LethalityLimits::of).forEach(criteria::addAll);
+        criteria.addAll(UnjudgedLimits.of(plan.limits()));
         return List.copyOf(criteria);
     }
 }

@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
  * @param what in words
  * @param where channel or channels
  * @param phase phase it is judged in
- * @param unit unit of value, limit, margin and uncertainty: "s", "K", or that of a lethality
+ * @param unit unit of value, limit, margin and uncertainty: "s", "K", "Pa" and their like, or that of a lethality
  * @param value measured value; empty if there is none
  * @param limit the plan's limit
  * @param atLeast true if the value has to reach the limit, false if it may not exceed it
@@ -55,6 +55,8 @@ public record Criterion(
         /** Agreement with saturation. */
         SATURATION,
         /** Lethality at a product probe. */
-        LETHALITY
+        LETHALITY,
+        /** Any other limit that the plan sets. */
+        OTHER
     }
 }

@@ -21,7 +21,11 @@ import org.steamwitness.finding.Severity;
 import org.steamwitness.plan.DecisionRule;
 import org.steamwitness.plan.LethalityAim;
 import org.steamwitness.plan.LethalityUnit;
+import org.steamwitness.plan.Limit;
+import org.steamwitness.plan.LimitKind;
+import org.steamwitness.plan.Measure;
 import org.steamwitness.plan.ProbeChoice;
+import org.steamwitness.quantity.Datum;
 import org.steamwitness.trace.Place;
 import org.steamwitness.trace.Reading;
 
@@ -367,6 +371,42 @@ class CriteriaTest {
         assertThat(evaluation.findings())
                 .extracting(Finding::text)
                 .containsExactly("1 samples of chamber are missing in the hold phase.");
+    }
+
+    @Test
+    void aLimitThatIsNotJudgedIsUndecidedAndNeverPasses() {
+        double[] celsius = held(20);
+        celsius[0] = 100;
+        celsius[19] = 60;
+        Bench bench = Bench.every(5, 20)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius), Bench.pressure(1, steam(20)));
+        assertThat(evaluate(bench).verdict().outcome()).isEqualTo(Outcome.MET);
+        Limit limit = new Limit(
+                LimitKind.COME_UP_TIME,
+                Measure.DURATION,
+                new Limit.Scope(Optional.empty(), List.of(), List.of(), Limit.Which.EACH, OptionalDouble.empty()),
+                Optional.of(new Limit.Figure(60, Datum.ABSOLUTE, "1 min")),
+                Optional.of(new Limit.Figure(600, Datum.ABSOLUTE, "10 min")),
+                List.of(),
+                Optional.empty(),
+                Optional.empty(),
+                Optional.of("study TD-07"),
+                Optional.empty());
+        Evaluation evaluation = evaluate(bench.limiting(limit));
+        assertThat(evaluation.verdict().outcome()).isEqualTo(Outcome.UNDECIDED);
+        List<Criterion> added = evaluation.criteria().stream()
+                .filter(c -> c.subject() == Criterion.Subject.OTHER)
+                .toList();
+        assertThat(added)
+                .extracting(Criterion::id)
+                .containsExactly("limit-1-come-up-time-least", "limit-1-come-up-time-most");
+        assertThat(added).allSatisfy(c -> {
+            assertThat(c.what()).isEqualTo("come-up-time, at least 1 min, at most 10 min");
+            assertThat(c.why()).isEqualTo("this version does not judge it; limit from study TD-07");
+            assertThat(c.decision()).isEqualTo(Decision.UNDECIDED);
+            assertThat(c.value()).isEmpty();
+            assertThat(c.phase()).isEqualTo("whole run");
+        });
     }
 
     private static Outcome outcome(List<Criterion> criteria, List<Finding> findings) {

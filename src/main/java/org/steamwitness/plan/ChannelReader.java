@@ -1,0 +1,139 @@
+package org.steamwitness.plan;
+
+import java.time.LocalDate;
+import java.util.List;
+import java.util.function.Function;
+import org.steamwitness.quantity.Datum;
+import org.steamwitness.quantity.PressureReading;
+import org.steamwitness.quantity.PressureUnit;
+import org.steamwitness.quantity.QuantityText;
+import org.steamwitness.quantity.TemperatureUnit;
+import org.steamwitness.trace.Place;
+import org.steamwitness.trace.QuantityKind;
+import org.steamwitness.trace.ReadingRules.ColumnRule;
+
+/** Understands one entry of {@code channels}. */
+final class ChannelReader {
+
+    /** Uncertainties without a coverage factor of their own are expanded by two; common practice, no source. */
+    private static final double EXPANDED = 2;
+
+    private ChannelReader() {}
+
+    static PlannedChannel channel(Section at) {
+        Entry<String> name = at.need("name").text();
+        Entry<String> column = at.need("column").text();
+        Entry<QuantityKind> kind = at.need("quantity").word(QuantityKind.class, QuantityKind::word);
+        Entry<Place> place = at.need("place").word(Place.class, Place::word);
+        Entry<Contact> contact = at.may("contact").word(Contact.class, Contact::word);
+        Entry<LocalDate> due = at.may("due").parsed("a date such as 2027-02-01", LocalDate::parse);
+        Entry<String> certificate = at.may("certificate").text();
+        boolean pressure = kind.kept().filter(k -> k == QuantityKind.PRESSURE).isPresent();
+        Entry<ColumnRule> rule = pressure ? pressureRule(at, name, column) : temperatureRule(at, name, column);
+        Function<String, Double> difference =
+                pressure ? QuantityText::pascalDifference : QuantityText::kelvinDifference;
+        Entry<PlannedChannel.StatedUncertainty> uncertainty = at.may("uncertainty")
+                .section(section -> uncertainty(
+                        section, pressure ? "a quantity such as 0.02 bar" : "a quantity such as 0.2 K", difference));
+        Entry<PlannedChannel.Lag> lag =
+                pressure ? Entry.absent() : at.may("lag").section(ChannelReader::lag);
+        Entry<Boolean> required = at.may("required").either("yes", "no");
+        Entry<List<SensorCorrection>> corrections =
+                at.may("corrections").anyNumber(section -> correction(section, rule, difference));
+        Place where = place.get();
+        kind.get();
+        return new PlannedChannel(
+                rule.get(),
+                where,
+                contact.or(where.steamContact() ? Contact.STEAM : Contact.SEALED),
+                uncertainty.optional(),
+                lag.optional(),
+                certificate.optional(),
+                required.or(true),
+                corrections.or(List.of()),
+                due.optional());
+    }
+
+    private static SensorCorrection correction(
+            Section at, Entry<ColumnRule> rule, Function<String, Double> difference) {
+        at.may("at");
+        at.may("add");
+        ColumnRule channel = rule.get();
+        Entry<Double> reading = channel.kind() == QuantityKind.TEMPERATURE
+                ? at.need("at").parsed("a temperature such as 121.0 degC", QuantityText::kelvin)
+                : at.need("at").parsed("a pressure such as 2.0 bar(g)", text -> pascal(text, channel.datum()));
+        Entry<Double> add = at.need("add").parsed("a difference such as 0.1 K", difference);
+        return new SensorCorrection(reading.get(), add.get());
+    }
+
+    private static double pascal(String text, Datum datum) {
+        PressureReading reading = QuantityText.pressure(text);
+        if (reading.datum() != datum) {
+            throw new IllegalArgumentException(
+                    "\"" + text + "\" is not counted as the channel is; expected (" + datum.mark() + ")");
+        }
+        return reading.pascal();
+    }
+
+    private static Entry<ColumnRule> temperatureRule(Section at, Entry<String> name, Entry<String> column) {
+        Entry<TemperatureUnit> unit = at.need("unit").word(TemperatureUnit.class, TemperatureUnit::symbol);
+        if (at.has("datum")) {
+            at.may("datum").refused("only a pressure has a datum");
+        }
+        return all(name, column, unit)
+                ? Entry.of(new ColumnRule(
+                        name.get(),
+                        column.get(),
+                        QuantityKind.TEMPERATURE,
+                        unit.get().symbol(),
+                        Datum.ABSOLUTE,
+                        unit.get()::toKelvin))
+                : Entry.broken();
+    }
+
+    private static Entry<ColumnRule> pressureRule(Section at, Entry<String> name, Entry<String> column) {
+        Entry<PressureUnit> unit = at.need("unit").word(PressureUnit.class, PressureUnit::symbol);
+        Entry<Datum> datum = at.need("datum").word(Datum.class, Datum::word);
+        return all(name, column, unit, datum)
+                ? Entry.of(new ColumnRule(
+                        name.get(),
+                        column.get(),
+                        QuantityKind.PRESSURE,
+                        unit.get().symbol(),
+                        datum.get(),
+                        unit.get()::toPascal))
+                : Entry.broken();
+    }
+
+    private static boolean all(Entry<?>... entries) {
+        for (Entry<?> entry : entries) {
+            if (entry.kept().isEmpty()) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static PlannedChannel.StatedUncertainty uncertainty(
+            Section at, String expected, Function<String, Double> difference) {
+        Entry<Double> calibration = at.need("calibration").parsed(expected, difference);
+        Entry<Double> drift = at.may("drift").parsed(expected, difference);
+        Entry<Double> shared = at.may("shared").parsed(expected, difference);
+        Entry<Double> coverage = at.need("coverage").parsed("a number such as 2", ChannelReader::coverage);
+        return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), shared.or(0.0), coverage.get());
+    }
+
+    private static PlannedChannel.Lag lag(Section at) {
+        Entry<Double> value = at.need("value").parsed("a duration such as 6 s", QuantityText::seconds);
+        Entry<Double> uncertainty = at.need("uncertainty").parsed("a duration such as 2 s", QuantityText::seconds);
+        return new PlannedChannel.Lag(value.get(), uncertainty.get() / EXPANDED);
+    }
+
+    private static double coverage(String text) {
+        double factor = Double.parseDouble(text);
+        if (!(factor >= 1 && factor <= 4)) {
+            throw new IllegalArgumentException("\"" + text + "\" is no coverage factor; expected 1 to 4");
+        }
+        return factor;
+    }
+}
