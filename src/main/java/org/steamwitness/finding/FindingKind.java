@@ -47,6 +47,11 @@ public enum FindingKind {
     // plan and run sheet can't be used
     /** A plan or run sheet does not keep its shape. */
     ENTRY_WRONG(Severity.BLOCKS, "{what}", "Correct the file at this place."),
+    /** A question mark where a value has to stand. */
+    OPEN_PLACE(
+            Severity.BLOCKS,
+            "open place: fill in {expected}",
+            "Fill in what the equipment, the scheduled process or the run gives; the comments of the file say what."),
     /** The run sheet was filled in for another plan. */
     PLAN_DIFFERS(
             Severity.BLOCKS,
@@ -128,6 +133,16 @@ public enum FindingKind {
             Severity.NOTE,
             "Columns of the log that no channel of the plan names: {columns}.",
             "Add them to the plan if they matter."),
+    /** A channel of a quantity that enters no result. */
+    CHANNEL_NOT_EVALUATED(
+            Severity.NOTE,
+            "The channel {channel} measures {quantity}, which this version reads and does not evaluate.",
+            "Look at it in the log; limits on it are listed as undecided."),
+    /** Entries that enter no result. */
+    ENTRIES_KEPT(
+            Severity.NOTE,
+            "These entries of the run sheet enter no result of this version: {entries}.",
+            "They stand in the attached run sheet; a person has to look at them."),
     /** Calibration is overdue on the day of the run. */
     CALIBRATION_OVERDUE(
             Severity.BLOCKS,

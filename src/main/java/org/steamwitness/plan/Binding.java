@@ -45,6 +45,7 @@ final class Binding {
                 plan.medium().saturated() ? plan.saturation() : Optional.empty(),
                 plan.lethality(),
                 plan.limits(),
+                UnjudgedDemands.shaking(plan, sheet),
                 plan.decision(),
                 plan.longestGapSeconds(),
                 plan.scanDelaySeconds(),
@@ -74,6 +75,10 @@ final class Binding {
         for (String demand : UnjudgedDemands.of(plan, sheet)) {
             find(FindingKind.DEMAND_NOT_JUDGED, Map.of("demand", demand));
         }
+        List<String> unused = UnjudgedDemands.onlyKept(sheet);
+        if (!unused.isEmpty()) {
+            find(FindingKind.ENTRIES_KEPT, Map.of("entries", String.join(", ", unused)));
+        }
         LocalDate day = trace.clock().first().toLocalDate();
         for (PlannedChannel channel : plan.channels()) {
             if (channel.due().filter(day::isAfter).isPresent()) {
@@ -93,8 +98,17 @@ final class Binding {
         for (int i = 0; i < plan.channels().size(); i++) {
             PlannedChannel planned = plan.channels().get(i);
             Channel read = trace.channels().get(i);
-            if (planned.rule().datum() == Datum.GAUGE
-                    && sheet.atmospherePascal().isEmpty()) {
+            if (!planned.mayStateUncertainty()) {
+                find(
+                        FindingKind.CHANNEL_NOT_EVALUATED,
+                        Map.of(
+                                "channel", planned.name(),
+                                "quantity", planned.rule().kind().word()));
+                continue;
+            }
+            boolean atmosphereKnown = plan.atmosphere() instanceof AtmosphereSource.Entered
+                    && sheet.atmospherePascal().isPresent();
+            if (planned.rule().datum() == Datum.GAUGE && !atmosphereKnown) {
                 continue;
             }
             bound.add(new BoundChannel(

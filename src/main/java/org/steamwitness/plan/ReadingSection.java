@@ -14,6 +14,7 @@ import java.util.OptionalDouble;
  * @param headerLine line that holds the headers, from 1
  * @param timeColumns headers of the columns that hold date and time
  * @param timeFormat how date and time are written, as a pattern of letters
+ * @param dateOrder in which order day, month and year stand, where a date does not show it
  * @param quotedLineBreaks whether a field in quotation marks may hold a line break
  * @param missingCodes what stands in the place of a missing value
  * @param largestRefusedShare share of rows that may be refused, 0 to 1
@@ -26,6 +27,7 @@ public record ReadingSection(
         Optional<Integer> headerLine,
         List<String> timeColumns,
         Optional<String> timeFormat,
+        Optional<String> dateOrder,
         Optional<Boolean> quotedLineBreaks,
         List<String> missingCodes,
         OptionalDouble largestRefusedShare) {
@@ -34,6 +36,7 @@ public record ReadingSection(
     static final List<String> DELIMITERS = List.of("comma", "semicolon", "tab", "pipe", "space");
     static final List<String> DECIMAL_MARKS = List.of("full stop", "comma");
     static final List<String> THOUSANDS_MARKS = List.of("none", "full stop", "comma", "space", "apostrophe");
+    static final List<String> DATE_ORDERS = List.of("day-first", "month-first", "year-first");
 
     /**
      * Checks the marks.
@@ -45,14 +48,21 @@ public record ReadingSection(
      * @param headerLine line that holds the headers
      * @param timeColumns headers of the columns that hold date and time
      * @param timeFormat how date and time are written
+     * @param dateOrder in which order day, month and year stand
      * @param quotedLineBreaks whether a field may hold a line break
      * @param missingCodes what stands in the place of a missing value
      * @param largestRefusedShare share of rows that may be refused
-     * @throws IllegalArgumentException if one mark would mean two things
+     * @throws IllegalArgumentException if one mark would mean two things, or more than two columns hold times
      */
     public ReadingSection {
         if (decimalMark.isPresent() && decimalMark.equals(thousandsMark)) {
             throw new IllegalArgumentException("decimal-mark and thousands-mark must differ");
+        }
+        if (delimiter.isPresent() && delimiter.equals(decimalMark)) {
+            throw new IllegalArgumentException("delimiter and decimal-mark must differ");
+        }
+        if (timeColumns.size() > 2) {
+            throw new IllegalArgumentException("expected one column of times, or two: date and time of day");
         }
         timeColumns = List.copyOf(timeColumns);
         missingCodes = List.copyOf(missingCodes);
