@@ -56,6 +56,8 @@ final class ChannelReader {
 
     private static SensorCorrection correction(
             Section at, Entry<ColumnRule> rule, Function<String, Double> difference) {
+        at.may("at");
+        at.may("add");
         ColumnRule channel = rule.get();
         Entry<Double> reading = channel.kind() == QuantityKind.TEMPERATURE
                 ? at.need("at").parsed("a temperature such as 121.0 degC", QuantityText::kelvin)
