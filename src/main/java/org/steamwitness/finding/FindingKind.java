@@ -58,6 +58,16 @@ public enum FindingKind {
             Severity.BLOCKS,
             "{refused} of {rows} rows were refused, more than the {share} % allowed; the first: line {line}, {reason}.",
             "Check that the log is whole and that the plan describes this log."),
+    /** More than one cycle. */
+    SEVERAL_CYCLES(
+            Severity.BLOCKS,
+            "The log holds {count} cycles: {cycles}.",
+            "Enter in the run sheet which part of the log is this run, such as log-part with from 08:05 and to 10:10."),
+    /** A part of the log that is not there. */
+    PART_OUTSIDE_LOG(
+            Severity.BLOCKS,
+            "The run sheet's log-part {from} to {to} does not lie in the log, which runs from {first} to {last}.",
+            "Correct log-part; its times are those of the log's clock."),
     /** A channel has no value at all. */
     CHANNEL_EMPTY(
             Severity.BLOCKS,
@@ -67,6 +77,11 @@ public enum FindingKind {
     // plan and run sheet can't be used
     /** A plan or run sheet does not keep its shape. */
     ENTRY_WRONG(Severity.BLOCKS, "{what}", "Correct the file at this place."),
+    /** A question mark where a value has to stand. */
+    OPEN_PLACE(
+            Severity.BLOCKS,
+            "open place: fill in {expected}",
+            "Fill in what the equipment, the scheduled process or the run gives; the comments of the file say what."),
     /** The run sheet was filled in for another plan. */
     PLAN_DIFFERS(
             Severity.BLOCKS,
@@ -128,6 +143,16 @@ public enum FindingKind {
             Severity.REVIEW,
             "The entered mark {mark} at {time} lies outside the log, which runs from {first} to {last}.",
             "Check the entry and the clock of the logger."),
+    /** Marks that can't be placed. */
+    MARKS_WITHOUT_CLOCK(
+            Severity.REVIEW,
+            "The log tells the time since its start alone, so that the entered marks can't be placed.",
+            "Enter under clocks what the log and a clock on the wall showed at one moment."),
+    /** The clock of the log differs from the one that entries are made by. */
+    CLOCK_SET(
+            Severity.NOTE,
+            "The log's clock showed {log} when the clock on the wall showed {wall}; times of this record are the wall's.",
+            "Nothing; line numbers lead to the log's own times."),
     /** Marks that come in an impossible order. */
     MARKS_OUT_OF_ORDER(
             Severity.BLOCKS, "The entered mark {later} comes before {earlier}.", "Check the entries of the run sheet."),
@@ -198,6 +223,16 @@ public enum FindingKind {
             Severity.NOTE,
             "Columns of the log that no channel of the plan names: {columns}.",
             "Add them to the plan if they matter."),
+    /** A channel of a quantity that enters no result. */
+    CHANNEL_NOT_EVALUATED(
+            Severity.NOTE,
+            "The channel {channel} measures {quantity}, which this version reads and does not evaluate.",
+            "Look at it in the log; limits on it are listed as undecided."),
+    /** Entries that enter no result. */
+    ENTRIES_KEPT(
+            Severity.NOTE,
+            "These entries of the run sheet enter no result of this version: {entries}.",
+            "They stand in the attached run sheet; a person has to look at them."),
     /** Calibration is overdue on the day of the run. */
     CALIBRATION_OVERDUE(
             Severity.BLOCKS,

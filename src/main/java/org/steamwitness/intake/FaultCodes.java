@@ -3,7 +3,6 @@ package org.steamwitness.intake;
 import java.util.Map;
 import java.util.TreeMap;
 import org.steamwitness.quantity.Datum;
-import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
 
 /**
@@ -26,11 +25,16 @@ final class FaultCodes {
     private int samples;
 
     FaultCodes(ColumnRule rule) {
-        boolean temperature = rule.kind() == QuantityKind.TEMPERATURE;
-        this.lowest = temperature
-                ? LOWEST_KELVIN
-                : rule.datum() == Datum.GAUGE ? LOWEST_GAUGE_PASCAL : LOWEST_ABSOLUTE_PASCAL;
-        this.highest = temperature ? HIGHEST_KELVIN : HIGHEST_PASCAL;
+        this.lowest = switch (rule.kind()) {
+            case TEMPERATURE -> LOWEST_KELVIN;
+            case PRESSURE -> rule.datum() == Datum.GAUGE ? LOWEST_GAUGE_PASCAL : LOWEST_ABSOLUTE_PASCAL;
+            default -> -Double.MAX_VALUE;
+        };
+        this.highest = switch (rule.kind()) {
+            case TEMPERATURE -> HIGHEST_KELVIN;
+            case PRESSURE -> HIGHEST_PASCAL;
+            default -> Double.MAX_VALUE;
+        };
     }
 
     /** The lowest value in SI units that the sensor could have measured. */

@@ -12,6 +12,7 @@ import org.steamwitness.finding.FindingKind;
 import org.steamwitness.finding.Position;
 import org.steamwitness.quantity.Datum;
 import org.steamwitness.trace.Channel;
+import org.steamwitness.trace.LogClock;
 import org.steamwitness.trace.Trace;
 
 /** One act of binding: resolves names, datums and marks, and collects what does not fit. */
@@ -45,6 +46,7 @@ final class Binding {
                 plan.medium().saturated() ? plan.saturation() : Optional.empty(),
                 plan.lethality(),
                 plan.limits(),
+                UnjudgedDemands.shaking(plan, sheet),
                 plan.decision(),
                 plan.longestGapSeconds(),
                 plan.scanDelaySeconds(),
@@ -74,6 +76,10 @@ final class Binding {
         for (String demand : UnjudgedDemands.of(plan, sheet)) {
             find(FindingKind.DEMAND_NOT_JUDGED, Map.of("demand", demand));
         }
+        List<String> unused = UnjudgedDemands.onlyKept(sheet);
+        if (!unused.isEmpty()) {
+            find(FindingKind.ENTRIES_KEPT, Map.of("entries", String.join(", ", unused)));
+        }
         for (PlannedChannel channel : plan.channels()) {
             Optional<LocalDate> day = trace.clock().date();
             if (channel.due().isPresent() && day.isEmpty()) {
@@ -95,8 +101,17 @@ final class Binding {
         for (int i = 0; i < plan.channels().size(); i++) {
             PlannedChannel planned = plan.channels().get(i);
             Channel read = trace.channels().get(i);
-            if (planned.rule().datum() == Datum.GAUGE
-                    && sheet.atmospherePascal().isEmpty()) {
+            if (!planned.mayStateUncertainty()) {
+                find(
+                        FindingKind.CHANNEL_NOT_EVALUATED,
+                        Map.of(
+                                "channel", planned.name(),
+                                "quantity", planned.rule().kind().word()));
+                continue;
+            }
+            boolean atmosphereKnown = plan.atmosphere() instanceof AtmosphereSource.Entered
+                    && sheet.atmospherePascal().isPresent();
+            if (planned.rule().datum() == Datum.GAUGE && !atmosphereKnown) {
                 continue;
             }
             bound.add(new BoundChannel(
@@ -118,6 +133,13 @@ final class Binding {
     }
 
     private Marks marks() {
+        boolean entered = sheet.steamOn().isPresent()
+                || sheet.ventClosed().isPresent()
+                || sheet.steamOff().isPresent();
+        if (entered && trace.clock().shows() == LogClock.Shows.ELAPSED) {
+            find(FindingKind.MARKS_WITHOUT_CLOCK, Map.of());
+            return new Marks(OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
+        }
         OptionalDouble steamOn = mark("steam-on", sheet.steamOn());
         OptionalDouble ventClosed = mark("vent-closed", sheet.ventClosed());
         OptionalDouble steamOff = mark("steam-off", sheet.steamOff());

@@ -16,6 +16,8 @@ import org.steamwitness.trace.Trace;
  * @param saturation tolerances, where the medium is meant to stand at saturation
  * @param lethality lethality aims
  * @param limits what else the plan sets limits on
+ * @param unheeded what plan and run sheet ask for that this version does not heed and without which nothing that is
+ *     decided may stand
  * @param decision how values are held against limits
  * @param longestGapSeconds longest time between two samples that a line may bridge
  * @param scanDelaySeconds how far apart the channels of one row may have been read, at most
@@ -30,6 +32,7 @@ public record BoundPlan(
         Optional<SaturationTolerance> saturation,
         List<LethalityAim> lethality,
         List<Limit> limits,
+        List<String> unheeded,
         DecisionRule decision,
         double longestGapSeconds,
         double scanDelaySeconds,

@@ -55,38 +55,11 @@ public record Chamber(
     /**
      * The load that is heated.
      *
-     * @param massKilogram its mass
-     * @param specificHeatJoulePerKilogramKelvin its specific heat
+     * @param heat its mass and specific heat, or what it is made of
      * @param channels that measure it
      * @param probes what these measure of it
      */
-    public record Load(
-            double massKilogram, double specificHeatJoulePerKilogramKelvin, List<String> channels, LoadProbes probes) {}
-
-    /** What a chamber is made of. */
-    public enum Material {
-        /** Stainless steel. */
-        STAINLESS_STEEL("stainless-steel"),
-        /** Carbon steel. */
-        CARBON_STEEL("carbon-steel"),
-        /** Aluminium. */
-        ALUMINIUM("aluminium");
-
-        private final String word;
-
-        Material(String word) {
-            this.word = word;
-        }
-
-        /**
-         * The word used in plans.
-         *
-         * @return such as "stainless-steel"
-         */
-        public String word() {
-            return word;
-        }
-    }
+    public record Load(LoadHeat heat, List<String> channels, LoadProbes probes) {}
 
     /** What the load's probes measure. */
     public enum LoadProbes {

@@ -34,18 +34,16 @@ final class ChamberReader {
 
     private static Chamber.Metal metal(Section at) {
         Entry<Double> mass = at.need("mass").parsed("a mass such as 640 kg", AmountText::massKilogram);
-        Entry<Chamber.Material> material = at.need("material").word(Chamber.Material.class, Chamber.Material::word);
+        Entry<Material> material = at.need("material").word(Material.class, Material::word);
         Entry<List<String>> channels = at.need("temperature").oneOrMore();
         return new Chamber.Metal(mass.get(), material.get(), channels.get());
     }
 
     private static Chamber.Load load(Section at) {
-        Entry<Double> mass = at.need("mass").parsed("a mass such as 410 kg", AmountText::massKilogram);
-        Entry<Double> heat = at.need("specific-heat")
-                .parsed("a specific heat such as 3.55 kJ/(kg K)", AmountText::specificHeatJoulePerKilogramKelvin);
         Entry<List<String>> channels = at.need("temperature").oneOrMore();
         Entry<Chamber.LoadProbes> probes = at.need("probes").word(Chamber.LoadProbes.class, Chamber.LoadProbes::word);
-        return new Chamber.Load(mass.get(), heat.get(), channels.get(), probes.get());
+        Entry<LoadHeat> heat = LoadHeatReader.heat(at);
+        return new Chamber.Load(heat.get(), channels.get(), probes.get());
     }
 
     static OptionalDouble number(Entry<Double> entry) {

@@ -5,9 +5,7 @@ import java.util.List;
 import java.util.function.Function;
 import org.steamwitness.quantity.Datum;
 import org.steamwitness.quantity.PressureReading;
-import org.steamwitness.quantity.PressureUnit;
 import org.steamwitness.quantity.QuantityText;
-import org.steamwitness.quantity.TemperatureUnit;
 import org.steamwitness.trace.Place;
 import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
@@ -29,17 +27,19 @@ final class ChannelReader {
         Entry<LocalDate> due = at.may("due").parsed("a date such as 2027-02-01", LocalDate::parse);
         Entry<String> certificate = at.may("certificate").text();
         boolean pressure = kind.kept().filter(k -> k == QuantityKind.PRESSURE).isPresent();
-        Entry<ColumnRule> rule = pressure ? pressureRule(at, name, column) : temperatureRule(at, name, column);
+        boolean temperature =
+                kind.kept().filter(k -> k == QuantityKind.TEMPERATURE).isPresent();
+        Entry<ColumnRule> rule = ColumnRuleReader.rule(at, name, column, kind);
         Function<String, Double> difference =
                 pressure ? QuantityText::pascalDifference : QuantityText::kelvinDifference;
-        Entry<PlannedChannel.StatedUncertainty> uncertainty = at.may("uncertainty")
-                .section(section -> uncertainty(
-                        section, pressure ? "a quantity such as 0.02 bar" : "a quantity such as 0.2 K", difference));
-        Entry<PlannedChannel.Lag> lag =
-                pressure ? Entry.absent() : at.may("lag").section(ChannelReader::lag);
+        Entry<PlannedChannel.StatedUncertainty> uncertainty = pressure || temperature
+                ? at.may("uncertainty").section(section -> uncertainty(section, difference, pressure ? "bar" : "K"))
+                : left(at, "uncertainty", kind);
+        Entry<PlannedChannel.Lag> lag = temperature ? at.may("lag").section(ChannelReader::lag) : left(at, "lag", kind);
         Entry<Boolean> required = at.may("required").either("yes", "no");
-        Entry<List<SensorCorrection>> corrections =
-                at.may("corrections").anyNumber(section -> correction(section, rule, difference));
+        Entry<List<SensorCorrection>> corrections = pressure || temperature
+                ? at.may("corrections").anyNumber(section -> correction(section, rule, difference))
+                : left(at, "corrections", kind);
         Place where = place.get();
         kind.get();
         return new PlannedChannel(
@@ -75,50 +75,19 @@ final class ChannelReader {
         return reading.pascal();
     }
 
-    private static Entry<ColumnRule> temperatureRule(Section at, Entry<String> name, Entry<String> column) {
-        Entry<TemperatureUnit> unit = at.need("unit").word(TemperatureUnit.class, TemperatureUnit::symbol);
-        if (at.has("datum")) {
-            at.may("datum").refused("only a pressure has a datum");
+    /** A key that waits for its quantity: it is unknown only where a quantity that has no such key is named. */
+    private static <T> Entry<T> left(Section at, String key, Entry<QuantityKind> kind) {
+        if (kind.kept().isEmpty()) {
+            at.may(key);
         }
-        return all(name, column, unit)
-                ? Entry.of(new ColumnRule(
-                        name.get(),
-                        column.get(),
-                        QuantityKind.TEMPERATURE,
-                        unit.get().symbol(),
-                        Datum.ABSOLUTE,
-                        unit.get()::toKelvin))
-                : Entry.broken();
-    }
-
-    private static Entry<ColumnRule> pressureRule(Section at, Entry<String> name, Entry<String> column) {
-        Entry<PressureUnit> unit = at.need("unit").word(PressureUnit.class, PressureUnit::symbol);
-        Entry<Datum> datum = at.need("datum").word(Datum.class, Datum::word);
-        return all(name, column, unit, datum)
-                ? Entry.of(new ColumnRule(
-                        name.get(),
-                        column.get(),
-                        QuantityKind.PRESSURE,
-                        unit.get().symbol(),
-                        datum.get(),
-                        unit.get()::toPascal))
-                : Entry.broken();
-    }
-
-    private static boolean all(Entry<?>... entries) {
-        for (Entry<?> entry : entries) {
-            if (entry.kept().isEmpty()) {
-                return false;
-            }
-        }
-        return true;
+        return Entry.absent();
     }
 
     private static PlannedChannel.StatedUncertainty uncertainty(
-            Section at, String expected, Function<String, Double> difference) {
-        Entry<Double> calibration = at.need("calibration").parsed(expected, difference);
-        Entry<Double> drift = at.may("drift").parsed(expected, difference);
-        Entry<Double> shared = at.may("shared").parsed(expected, difference);
+            Section at, Function<String, Double> difference, String unit) {
+        Entry<Double> calibration = at.need("calibration").parsed("an uncertainty such as 0.2 " + unit, difference);
+        Entry<Double> drift = at.may("drift").parsed("an uncertainty such as 0.1 " + unit, difference);
+        Entry<Double> shared = at.may("shared").parsed("an uncertainty such as 0.1 " + unit, difference);
         Entry<Double> coverage = at.need("coverage").parsed("a number such as 2", ChannelReader::coverage);
         return new PlannedChannel.StatedUncertainty(calibration.get(), drift.or(0.0), shared.or(0.0), coverage.get());
     }

@@ -54,6 +54,12 @@ final class Document {
         return new Section(this, mapping, "").read(reader).kept();
     }
 
+    /** Reports a place that nobody has filled in yet. */
+    void open(int line, int column, String path, String expected) {
+        problems.add(new Finding(
+                FindingKind.OPEN_PLACE, new Position(file, line, column, path), Map.of("expected", expected)));
+    }
+
     private Optional<Node> compose(byte[] bytes) {
         String text;
         try {
@@ -67,8 +73,8 @@ final class Document {
         }
         try {
             LoadSettings settings = LoadSettings.builder().setLabel(file).build();
-            Optional<Node> root =
-                    new Compose(settings).composeString(text.startsWith("\uFEFF") ? text.substring(1) : text);
+            Optional<Node> root = new Compose(settings)
+                    .composeString(OpenPlace.readable(text.startsWith("\uFEFF") ? text.substring(1) : text));
             if (root.isEmpty()) {
                 refuse(1, 1, "", "the file is empty");
             }

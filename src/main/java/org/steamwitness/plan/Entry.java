@@ -30,6 +30,10 @@ final class Entry<T> {
         return (Entry<T>) BROKEN;
     }
 
+    boolean isBroken() {
+        return broken;
+    }
+
     /** The value; its absence or refusal has been reported already and ends the section. */
     T get() {
         if (value == null) {

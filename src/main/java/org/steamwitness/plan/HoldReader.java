@@ -24,8 +24,18 @@ final class HoldReader {
         Entry<Boolean> fails = at.may("interruption").either("fails", "restarts");
         Entry<Double> equilibration = at.may("equilibration").parsed("a duration such as 30 s", QuantityText::seconds);
         Entry<HoldStep.AllowedExcursion> excursion = at.may("allowed-excursion").section(HoldReader::excursion);
-        Hold hold = hold(at);
-        return new HoldStep(hold, fails.or(false), equilibration.or(0.0), excursion.optional());
+        Entry<Double> atLeast = at.need("at-least").parsed("a temperature such as 121.1 degC", QuantityText::kelvin);
+        Entry<Double> atMost = at.need("at-most").parsed("a temperature such as 124.1 degC", QuantityText::kelvin);
+        Entry<Double> setPoint = at.may("set-point").parsed("a temperature such as 122.0 degC", QuantityText::kelvin);
+        Entry<Double> duration = at.need("duration").parsed("a duration such as 42 min", QuantityText::seconds);
+        Entry<Starts> starts = at.need("starts").section(HoldReader::starts);
+        Hold hold = new Hold(
+                atLeast.get(),
+                atMost.get(),
+                setPoint.optional(),
+                duration.get(),
+                starts.get().channels());
+        return new HoldStep(hold, starts.get().any(), fails.or(false), equilibration.or(0.0), excursion.optional());
     }
 
     private static HoldStep.AllowedExcursion excursion(Section at) {
@@ -36,26 +46,11 @@ final class HoldReader {
         return new HoldStep.AllowedExcursion(depth.get(), longest.get(), source.get());
     }
 
-    private static Hold hold(Section at) {
-        Entry<Double> atLeast = at.need("at-least").parsed("a temperature such as 121.1 degC", QuantityText::kelvin);
-        Entry<Double> atMost = at.need("at-most").parsed("a temperature such as 124.1 degC", QuantityText::kelvin);
-        Entry<Double> setPoint = at.may("set-point").parsed("a temperature such as 122.0 degC", QuantityText::kelvin);
-        Entry<Double> duration = at.need("duration").parsed("a duration such as 42 min", QuantityText::seconds);
-        Entry<List<String>> starts = at.need("starts").section(HoldReader::starts);
-        return new Hold(atLeast.get(), atMost.get(), setPoint.optional(), duration.get(), starts.get());
-    }
-
-    private static List<String> starts(Section at) {
-        Entry<String> when = at.need("when").parsed("one of: all", HoldReader::all);
+    private static Starts starts(Section at) {
+        Entry<Boolean> any = at.need("when").either("any", "all");
         Entry<List<String>> channels = at.need("channels").list(Slot::text);
-        when.get();
-        return channels.get();
+        return new Starts(any.get(), channels.get());
     }
 
-    private static String all(String text) {
-        if (!text.equals("all")) {
-            throw new IllegalArgumentException("\"" + text + "\" is not one of: all");
-        }
-        return text;
-    }
+    private record Starts(boolean any, List<String> channels) {}
 }

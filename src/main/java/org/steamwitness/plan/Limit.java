@@ -12,6 +12,7 @@ import org.steamwitness.trace.Place;
  * @param what what it is set on
  * @param measure what its figures are stated in
  * @param scope where and when it holds
+ * @param terms what only a few kinds of limits have
  * @param atLeast what has to be reached
  * @param atMost what may not be exceeded
  * @param anyOf ways of which one suffices, each a time at a temperature
@@ -24,6 +25,7 @@ public record Limit(
         LimitKind what,
         Measure measure,
         Scope scope,
+        Terms terms,
         Optional<Figure> atLeast,
         Optional<Figure> atMost,
         List<Way> anyOf,
@@ -38,6 +40,7 @@ public record Limit(
      * @param what what it is set on
      * @param measure what its figures are stated in
      * @param scope where and when it holds
+     * @param terms what only a few kinds of limits have
      * @param atLeast what has to be reached
      * @param atMost what may not be exceeded
      * @param anyOf ways of which one suffices
@@ -45,9 +48,12 @@ public record Limit(
      * @param decision how it is decided
      * @param source where it comes from
      * @param edition edition of that source
-     * @throws IllegalArgumentException if there is none, or at-least lies above at-most
+     * @throws IllegalArgumentException if there is none, a vent has no any-of, at-least lies above at-most, or the alert outside the limit
      */
     public Limit {
+        if (what == LimitKind.VENT && anyOf.isEmpty()) {
+            throw new IllegalArgumentException("a vent needs any-of: ways of a time and a temperature together");
+        }
         if (atLeast.isEmpty() && atMost.isEmpty() && anyOf.isEmpty()) {
             throw new IllegalArgumentException("a limit needs at-least, at-most or any-of");
         }
@@ -62,7 +68,31 @@ public record Limit(
                 throw new IllegalArgumentException("at-least may not lie above at-most");
             }
         }
+        alert.ifPresent(figure -> checkAlert(figure, atLeast, atMost));
         anyOf = List.copyOf(anyOf);
+    }
+
+    private static void checkAlert(Figure alert, Optional<Figure> atLeast, Optional<Figure> atMost) {
+        if (atLeast.isPresent() == atMost.isPresent()) {
+            throw new IllegalArgumentException("an alert needs either at-least or at-most beside it");
+        }
+        Figure limit = atLeast.or(() -> atMost).orElseThrow();
+        if (alert.datum() != limit.datum()) {
+            throw new IllegalArgumentException("alert and limit must be counted from the same datum");
+        }
+        if (atLeast.isPresent() ? alert.si() < limit.si() : alert.si() > limit.si()) {
+            throw new IllegalArgumentException("the alert must lie inside the limit");
+        }
+    }
+
+    /**
+     * How criteria on this limit are named, with an ending for the side that they judge.
+     *
+     * @param index of the limit in its plan, from 0
+     * @return such as "limit-1-spread"
+     */
+    public String idAt(int index) {
+        return "limit-" + (index + 1) + "-" + what.word();
     }
 
     /**
@@ -72,9 +102,13 @@ public record Limit(
      */
     public String words() {
         StringBuilder words = new StringBuilder(what.word());
+        terms.name().ifPresent(name -> words.append(", ").append(name));
         scope.phase().ifPresent(phase -> words.append(", ").append(phase.word()));
         if (!scope.where().isEmpty()) {
             words.append(", ").append(scope.where());
+        }
+        if (scope.which() != Which.EACH) {
+            words.append(", ").append(scope.which().word());
         }
         atLeast.ifPresent(figure -> words.append(", at least ").append(figure.written()));
         atMost.ifPresent(figure -> words.append(", at most ").append(figure.written()));
@@ -132,6 +166,39 @@ public record Limit(
             return places.isEmpty()
                     ? String.join(", ", channels)
                     : String.join(", ", places.stream().map(Place::word).toList());
+        }
+    }
+
+    /**
+     * What only a few kinds of limits have.
+     *
+     * @param name which of the plan's lethalities is meant
+     * @param fromSeconds from when after the start of the phase a probe is held against the reference
+     * @param untilSeconds until when
+     * @param settleSeconds how long the pressure settles before the rise of a leak test is measured
+     * @param startPressure from which pressure, at most, a leak test may start
+     */
+    public record Terms(
+            Optional<String> name,
+            OptionalDouble fromSeconds,
+            OptionalDouble untilSeconds,
+            OptionalDouble settleSeconds,
+            Optional<Figure> startPressure) {
+
+        /**
+         * Checks the window.
+         *
+         * @param name which of the plan's lethalities is meant
+         * @param fromSeconds from when after the start of the phase
+         * @param untilSeconds until when
+         * @param settleSeconds how long the pressure settles
+         * @param startPressure from which pressure, at most
+         * @throws IllegalArgumentException if from is not before until
+         */
+        public Terms {
+            if (!(fromSeconds.orElse(0) < untilSeconds.orElse(Double.POSITIVE_INFINITY))) {
+                throw new IllegalArgumentException("from must come before until");
+            }
         }
     }
 

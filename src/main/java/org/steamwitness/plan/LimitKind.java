@@ -28,8 +28,12 @@ public enum LimitKind {
     RECORDER_AGAINST_INDICATING(Measure.TEMPERATURE_DIFFERENCE),
     /** A probe less the reference. */
     PROBE_AGAINST_REFERENCE(Measure.TEMPERATURE_DIFFERENCE),
-    /** Pulses of the air removal: how many, how deep, how high. */
-    PULSES(Measure.COUNT, Measure.PRESSURE),
+    /** How many pulses the air removal has. */
+    PULSES(Measure.COUNT),
+    /** Lowest pressure of each pulse. */
+    PULSE_DEPTH(Measure.PRESSURE),
+    /** Highest pressure of each pulse. */
+    PULSE_PEAK(Measure.PRESSURE),
     /** Time that slower probes take to reach the band. */
     EQUILIBRATION(Measure.DURATION),
     /** How fast a temperature changes. */
@@ -42,6 +46,8 @@ public enum LimitKind {
     SATURATION(Measure.TEMPERATURE_DIFFERENCE),
     /** Lethality, in time at its reference. */
     LETHALITY(Measure.DURATION),
+    /** Cook value, in time at its reference. */
+    COOK_VALUE(Measure.DURATION),
     /** Rise of pressure under vacuum. */
     AIR_LEAKAGE(Measure.PRESSURE_RATE),
     /** Time or pressure of drying. */
@@ -94,9 +100,11 @@ public enum LimitKind {
 
     /** Whether a window of time belongs to it. */
     boolean overTime() {
-        return this == TEMPERATURE_RATE
-                || this == PRESSURE_RATE
-                || this == AIR_LEAKAGE
-                || this == PROBE_AGAINST_REFERENCE;
+        return this == TEMPERATURE_RATE || this == PRESSURE_RATE || this == AIR_LEAKAGE;
+    }
+
+    /** Whether it may name one of the plan's lethalities. */
+    boolean named() {
+        return this == LETHALITY || this == COOK_VALUE;
     }
 }

@@ -3,6 +3,7 @@ package org.steamwitness.plan;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 import org.steamwitness.quantity.QuantityText;
 import org.steamwitness.trace.Place;
 
@@ -13,20 +14,22 @@ final class LimitReader {
 
     static Limit limit(Section at) {
         Entry<LimitKind> what = at.need("what").word(LimitKind.class, LimitKind::word);
+        Entry<Limit.Scope> scope = scope(at, what);
         Optional<Measure> measure = measure(at, what);
         Entry<Limit.Figure> atLeast = figure(at.may("at-least"), measure);
         Entry<Limit.Figure> atMost = figure(at.may("at-most"), measure);
         Entry<List<Limit.Way>> anyOf = ways(at, what);
         Entry<Limit.Figure> alert = figure(at.may("alert"), measure);
+        Entry<Limit.Terms> terms = terms(at, what);
         Entry<DecisionRule> decision = at.may("decision").section(DecisionReader::decision);
         Entry<String> source = at.may("source").text();
         Entry<String> edition = at.may("edition").text();
-        Entry<Limit.Scope> scope = scope(at, what);
         LimitKind kind = what.get();
         return new Limit(
                 kind,
                 measure.orElseGet(kind::usual),
                 scope.get(),
+                terms.get(),
                 atLeast.optional(),
                 atMost.optional(),
                 anyOf.or(List.of()),
@@ -49,9 +52,13 @@ final class LimitReader {
         if (at.has("over") && !windowed) {
             return at.may("over").refused("this limit has no window of time");
         }
-        Set<LimitKind> rates = Set.of(LimitKind.TEMPERATURE_RATE, LimitKind.PRESSURE_RATE);
-        if (!at.has("over") && what.kept().filter(rates::contains).isPresent()) {
+        Set<Measure> rates = Set.of(Measure.TEMPERATURE_RATE, Measure.PRESSURE_RATE);
+        if (!at.has("over")
+                && what.kept().filter(k -> rates.containsAll(k.measures())).isPresent()) {
             at.refuse("over", "required key is missing: a rate needs its window, such as 30 s");
+            return Entry.broken();
+        }
+        if (Stream.of(phase, places, channels, which, over).anyMatch(Entry::isBroken)) {
             return Entry.broken();
         }
         return Entry.of(new Limit.Scope(
@@ -60,6 +67,36 @@ final class LimitReader {
                 channels.or(List.of()),
                 which.or(Limit.Which.EACH),
                 ChamberReader.number(over)));
+    }
+
+    /** What only a few kinds have; a kind that has it not knows no such key. */
+    private static Entry<Limit.Terms> terms(Section at, Entry<LimitKind> what) {
+        Optional<LimitKind> kind = what.kept();
+        Entry<String> name = kind.filter(k -> !k.named()).isPresent()
+                ? Entry.absent()
+                : at.may("name").text();
+        boolean windowed =
+                kind.filter(k -> k != LimitKind.PROBE_AGAINST_REFERENCE).isEmpty();
+        Entry<Double> from = windowed ? duration(at.may("from")) : Entry.absent();
+        Entry<Double> until = windowed ? duration(at.may("until")) : Entry.absent();
+        boolean leak = kind.filter(k -> k != LimitKind.AIR_LEAKAGE).isEmpty();
+        Entry<Double> settle = leak ? duration(at.may("settle")) : Entry.absent();
+        Entry<Limit.Figure> start = leak
+                ? at.may("start-pressure").parsed(Measure.PRESSURE.expected(), Measure.PRESSURE::figure)
+                : Entry.absent();
+        if (Stream.of(name, from, until, settle, start).anyMatch(Entry::isBroken)) {
+            return Entry.broken();
+        }
+        return Entry.of(new Limit.Terms(
+                name.optional(),
+                ChamberReader.number(from),
+                ChamberReader.number(until),
+                ChamberReader.number(settle),
+                start.optional()));
+    }
+
+    private static Entry<Double> duration(Slot slot) {
+        return slot.parsed("a duration such as 60 s", QuantityText::seconds);
     }
 
     /** Where two measures are possible, the one that the first figure can be read in. */

@@ -4,29 +4,30 @@ import org.steamwitness.quantity.AmountText;
 import org.steamwitness.quantity.Datum;
 import org.steamwitness.quantity.QuantityText;
 import org.steamwitness.quantity.RateText;
+import org.steamwitness.quantity.TemperatureUnit;
 
 /** What kind of quantity a limit is stated in, and how it is written. */
 public enum Measure {
     /** A temperature. */
-    TEMPERATURE("K", "a temperature such as 121.1 degC"),
+    TEMPERATURE("°C", "a temperature such as 121.1 degC"),
     /** A difference of temperatures. */
     TEMPERATURE_DIFFERENCE("K", "a temperature difference such as 1.5 K"),
     /** A duration. */
     DURATION("s", "a duration such as 15 min"),
     /** A pressure with its datum. */
-    PRESSURE("Pa", "a pressure such as 205 kPa(a)"),
+    PRESSURE("kPa", "a pressure such as 205 kPa(a)"),
     /** A difference of pressures. */
-    PRESSURE_DIFFERENCE("Pa", "a pressure difference such as 0.2 bar"),
+    PRESSURE_DIFFERENCE("kPa", "a pressure difference such as 0.2 bar"),
     /** A rate of temperature. */
-    TEMPERATURE_RATE("K/s", "a rate such as 2.5 K/min"),
+    TEMPERATURE_RATE("K/min", "a rate such as 2.5 K/min"),
     /** A rate of pressure. */
-    PRESSURE_RATE("Pa/s", "a rate such as 0.3 bar/min"),
+    PRESSURE_RATE("kPa/min", "a rate such as 0.3 bar/min"),
     /** A mass flow. */
-    MASS_FLOW("kg/s", "a flow such as 120 kg/h"),
+    MASS_FLOW("kg/h", "a flow such as 120 kg/h"),
     /** A length. */
-    LENGTH("m", "a level such as 73 mm"),
+    LENGTH("mm", "a level such as 73 mm"),
     /** A rotation. */
-    ROTATION("1/s", "a rotation such as 12 rpm"),
+    ROTATION("1/min", "a rotation such as 12 rpm"),
     /** A number of events. */
     COUNT("1", "a whole number such as 4");
 
@@ -39,12 +40,30 @@ public enum Measure {
     }
 
     /**
-     * The unit of figures inside the program.
+     * The unit in which people read a figure of this kind.
      *
-     * @return such as "Pa/s"
+     * @return such as "kPa/min"
      */
     public String unit() {
         return unit;
+    }
+
+    /**
+     * A figure as people read it.
+     *
+     * @param si in the SI unit of the measure
+     * @return in {@link #unit()}
+     */
+    public double printed(double si) {
+        return switch (this) {
+            case TEMPERATURE -> TemperatureUnit.CELSIUS.ofKelvin(si);
+            case PRESSURE, PRESSURE_DIFFERENCE -> si / 1000;
+            case PRESSURE_RATE -> si * 60 / 1000;
+            case TEMPERATURE_RATE, ROTATION -> si * 60;
+            case MASS_FLOW -> si * 3600;
+            case LENGTH -> si * 1000;
+            case TEMPERATURE_DIFFERENCE, DURATION, COUNT -> si;
+        };
     }
 
     String expected() {

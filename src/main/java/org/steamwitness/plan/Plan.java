@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.steamwitness.trace.ReadingRules;
+import org.steamwitness.trace.Told;
 
 /**
  * What a cycle on this equipment must do, as people wrote and approved it.
@@ -19,7 +20,7 @@ import org.steamwitness.trace.ReadingRules;
  * @param medium what heats the load
  * @param atmosphere where the pressure of the atmosphere comes from
  * @param chamber the chamber and what is in it
- * @param reading how its logs are written
+ * @param reading what it says of how its logs are written
  * @param channels the channels it needs, in its own order
  * @param steps the holds it asks for, one after the other; empty if the process has none
  * @param sampling how often the log has to sample
@@ -44,7 +45,7 @@ public record Plan(
         Medium medium,
         AtmosphereSource atmosphere,
         Optional<Chamber> chamber,
-        Optional<ReadingSection> reading,
+        Told reading,
         List<PlannedChannel> channels,
         List<HoldStep> steps,
         Optional<Sampling> sampling,
@@ -84,7 +85,7 @@ public record Plan(
      * @return one rule a channel
      */
     public ReadingRules readingRules() {
-        return new ReadingRules(channels.stream().map(PlannedChannel::rule).toList());
+        return new ReadingRules(channels.stream().map(PlannedChannel::rule).toList(), reading);
     }
 
     /**

@@ -24,7 +24,9 @@ final class PlanCheck {
             if (!names.add(channel.name())) {
                 at.refuse("channels", "two channels are named \"" + channel.name() + "\"");
             }
-            if (guarded && channel.uncertainty().isEmpty()) {
+            if (guarded
+                    && channel.mayStateUncertainty()
+                    && channel.uncertainty().isEmpty()) {
                 at.refuse(
                         "channels",
                         "a guarded decision needs the uncertainty of channel \"" + channel.name()
@@ -41,6 +43,11 @@ final class PlanCheck {
                             "limits",
                             limit.what().word() + ".channels names \"" + name + "\", which is not among the channels"));
         }
+        plan.limits().stream()
+                .flatMap(limit -> limit.terms().name().stream())
+                .filter(name ->
+                        plan.lethality().stream().noneMatch(aim -> aim.name().equals(name)))
+                .forEach(name -> at.refuse("limits", "name is \"" + name + "\", which is no lethality of this plan"));
         plan.chamber().ifPresent(chamber -> chamber(at, chamber, byName));
         if (plan.atmosphere() instanceof AtmosphereSource.Measured measured) {
             PlannedChannel channel = byName.get(measured.name());
@@ -62,7 +69,9 @@ final class PlanCheck {
         if (pressures > 1) {
             at.refuse("channels", "two channels measure the chamber's pressure; expected one");
         }
-        if (plan.medium().saturated() && plan.saturation().isEmpty()) {
+        if (plan.process().holds()
+                && plan.medium().saturated()
+                && plan.saturation().isEmpty()) {
             at.refuse("saturation", "required key is missing: the medium is saturated steam");
         }
     }

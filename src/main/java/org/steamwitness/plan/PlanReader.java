@@ -5,6 +5,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import org.steamwitness.quantity.QuantityText;
+import org.steamwitness.trace.Told;
 
 /** Understands the keys of a plan. */
 final class PlanReader {
@@ -25,7 +26,7 @@ final class PlanReader {
         Entry<Medium> medium = at.need("medium").word(Medium.class, Medium::word);
         Entry<AtmosphereSource> atmosphere = AtmosphereReader.source(at.need("atmosphere"));
         Entry<Chamber> chamber = at.may("chamber").section(ChamberReader::chamber);
-        Entry<ReadingSection> reading = at.may("reading").section(ReadingSectionReader::reading);
+        Entry<Told> reading = at.may("reading").section(ReadingSectionReader::told);
         Entry<List<PlannedChannel>> channels = at.need("channels").list(slot -> slot.section(ChannelReader::channel));
         boolean holds = process.kept().map(CycleProcess::holds).orElse(true);
         Entry<List<HoldStep>> steps = holds ? HoldReader.steps(at.need("hold")) : Entry.absent();
@@ -51,7 +52,7 @@ final class PlanReader {
                 medium.get(),
                 atmosphere.get(),
                 chamber.optional(),
-                reading.optional(),
+                reading.or(Told.NOTHING),
                 channels.get(),
                 steps.or(List.of()),
                 sampling.optional(),

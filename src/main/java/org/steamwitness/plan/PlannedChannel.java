@@ -4,6 +4,7 @@ import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import org.steamwitness.trace.Place;
+import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
 
 /**
@@ -60,6 +61,15 @@ public record PlannedChannel(
      */
     public String name() {
         return rule.channel();
+    }
+
+    /**
+     * Tells whether this is a quantity of which a plan states the uncertainty.
+     *
+     * @return true for temperatures and pressures, which alone are held against limits with it
+     */
+    public boolean mayStateUncertainty() {
+        return rule.kind() == QuantityKind.TEMPERATURE || rule.kind() == QuantityKind.PRESSURE;
     }
 
     /**

@@ -86,6 +86,12 @@ final class Section {
         document.refuse(line, column, at, what);
     }
 
+    void openAt(Node place, String at, String expected) {
+        int line = place.getStartMark().map(Mark::getLine).orElse(0) + 1;
+        int column = place.getStartMark().map(Mark::getColumn).orElse(0) + 1;
+        document.open(line, column, at, expected);
+    }
+
     private String pathOf(String key) {
         return path.isEmpty() ? key : path + "." + key;
     }

@@ -15,9 +15,6 @@ import org.snakeyaml.engine.v2.nodes.Tag;
 /** The value under one key, not yet understood. Each way to understand it reports what it has to refuse. */
 final class Slot {
 
-    /** Stands in a draft where a person has to fill in a value. */
-    static final String OPEN = "?";
-
     private final Document document;
     private final Section owner;
     private final String path;
@@ -32,10 +29,6 @@ final class Slot {
 
     boolean isEmpty() {
         return node == null;
-    }
-
-    private boolean isOpen() {
-        return node instanceof ScalarNode scalar && scalar.getValue().equals(OPEN);
     }
 
     boolean isSection() {
@@ -59,18 +52,19 @@ final class Slot {
         if (!(node instanceof ScalarNode scalar)) {
             return refused("expected " + expected);
         }
+        if (isOpen()) {
+            return open(expected);
+        }
         if (scalar.getTag().equals(Tag.NULL) || scalar.getValue().isBlank()) {
             return refused("is empty; expected " + expected);
         }
-        if (scalar.getValue().equals(OPEN)) {
-            return refused("open place: fill in " + expected);
-        }
+        String value = OpenPlace.asWritten(scalar.getValue());
         try {
-            return Entry.of(parser.apply(scalar.getValue()));
+            return Entry.of(parser.apply(value));
         } catch (DateTimeException notATime) {
-            return refused("\"" + scalar.getValue() + "\" is not " + expected);
+            return refused("\"" + value + "\" is not " + expected);
         } catch (NumberFormatException notANumber) {
-            return refused("\"" + scalar.getValue() + "\" is not " + expected);
+            return refused("\"" + value + "\" is not " + expected);
         } catch (IllegalArgumentException wrong) {
             return refused(wrong.getMessage());
         }
@@ -136,10 +130,11 @@ final class Slot {
         if (isEmpty()) {
             return Entry.absent();
         }
+        if (isOpen()) {
+            return open("keys and values, one level deeper");
+        }
         if (!(node instanceof MappingNode mapping)) {
-            return isOpen()
-                    ? refused("open place: fill in keys and values, one level deeper")
-                    : refused("expected keys and values, one level deeper");
+            return refused("expected keys and values, one level deeper");
         }
         return new Section(document, mapping, path).read(reader);
     }
@@ -149,8 +144,11 @@ final class Slot {
         if (isEmpty()) {
             return Entry.absent();
         }
+        if (isOpen()) {
+            return open("a list");
+        }
         if (!(node instanceof SequenceNode sequence)) {
-            return isOpen() ? refused("open place: fill in a list") : refused("expected a list");
+            return refused("expected a list");
         }
         if (sequence.getValue().isEmpty()) {
             return refused("the list is empty; expected one entry or more");
@@ -172,6 +170,16 @@ final class Slot {
             return Entry.of(List.of());
         }
         return list(slot -> slot.section(reader));
+    }
+
+    /** Tells whether a question mark stands here. */
+    private boolean isOpen() {
+        return node instanceof ScalarNode scalar && OpenPlace.is(scalar.getValue());
+    }
+
+    private <T> Entry<T> open(String expected) {
+        owner.openAt(node, path, expected);
+        return Entry.broken();
     }
 
     <T> Entry<T> refused(String what) {

@@ -21,7 +21,6 @@ final class UnjudgedDemands {
         if (!(plan.atmosphere() instanceof AtmosphereSource.Entered)) {
             demands.add("atmosphere: " + plan.atmosphere().words());
         }
-        plan.reading().ifPresent(reading -> demands.add("reading"));
         plan.channels().stream()
                 .filter(channel -> !channel.corrections().isEmpty())
                 .forEach(channel -> demands.add("corrections of channel " + channel.name()));
@@ -39,7 +38,6 @@ final class UnjudgedDemands {
             demands.add("marks-decide: no");
         }
         plan.markAgreementSeconds().ifPresent(seconds -> demands.add("mark-agreement"));
-        sheet.logPart().ifPresent(part -> demands.add("log-part " + part.from() + " to " + part.to()));
         sheet.corrections().forEach(correction -> demands.add("correction: " + correction.what()));
         return List.copyOf(demands);
     }
@@ -49,6 +47,9 @@ final class UnjudgedDemands {
             demands.add("hold steps after the first: " + (plan.steps().size() - 1));
         }
         for (HoldStep step : plan.steps()) {
+            if (step.startsWithAny()) {
+                demands.add("hold.starts.when: any");
+            }
             if (step.interruptionFails()) {
                 demands.add("hold.interruption: fails");
             }
@@ -58,6 +59,51 @@ final class UnjudgedDemands {
             if (step.excursion().isPresent()) {
                 demands.add("hold.allowed-excursion");
             }
+        }
+    }
+
+    /**
+     * Those among them without which neither the samples nor the hold are what plan and run sheet mean: nothing that is
+     * decided without them may stand.
+     */
+    static List<String> shaking(Plan plan, RunSheet sheet) {
+        List<String> shaking = new ArrayList<>();
+        if (plan.process() != CycleProcess.RETORT) {
+            shaking.add("process: " + plan.process().word());
+        }
+        if (plan.channels().stream().anyMatch(channel -> !channel.corrections().isEmpty())) {
+            shaking.add("corrections of channels");
+        }
+        if (plan.steps().stream().anyMatch(HoldStep::startsWithAny)) {
+            shaking.add("hold.starts.when: any");
+        }
+        if (plan.steps().stream().anyMatch(step -> step.excursion().isPresent())) {
+            shaking.add("hold.allowed-excursion");
+        }
+        if (!plan.marksDecide()) {
+            shaking.add("marks-decide: no");
+        }
+        if (!sheet.corrections().isEmpty()) {
+            shaking.add("corrections of the run sheet");
+        }
+        return List.copyOf(shaking);
+    }
+
+    /** Entries of a run sheet that are kept with the record and enter no result. */
+    static List<String> onlyKept(RunSheet sheet) {
+        List<String> kept = new ArrayList<>();
+        sheet.water().ifPresent(water -> kept.add("water"));
+        sheet.marks().timingStarted().ifPresent(mark -> kept.add("marks.timing-started"));
+        addIf(!sheet.readings().isEmpty(), "readings", kept);
+        addIf(!sheet.probes().isEmpty(), "probes", kept);
+        addIf(!sheet.indicators().isEmpty(), "indicators", kept);
+        addIf(!sheet.events().isEmpty(), "events", kept);
+        return List.copyOf(kept);
+    }
+
+    private static void addIf(boolean there, String entry, List<String> kept) {
+        if (there) {
+            kept.add(entry);
         }
     }
 }

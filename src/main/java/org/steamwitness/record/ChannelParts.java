@@ -63,11 +63,23 @@ final class ChannelParts {
                         .map(due -> Given.of(due.toString()))
                         .orElseGet(() -> Given.withheld("not stated", "plan: channels.due")),
                 Given.withheld(NOT_EVALUATED),
-                extreme(measure.map(ChannelMeasure::lowest), pressure),
-                extreme(measure.map(ChannelMeasure::highest), pressure));
+                planned.mayStateUncertainty()
+                        ? extreme(measure.map(ChannelMeasure::lowest), pressure)
+                        : Given.withheld(NOT_EVALUATED),
+                planned.mayStateUncertainty()
+                        ? extreme(measure.map(ChannelMeasure::highest), pressure)
+                        : Given.withheld(NOT_EVALUATED));
+    }
+
+    private boolean isBound(PlannedChannel planned) {
+        return evidence.bound().channels().stream()
+                .anyMatch(channel -> channel.name().equals(planned.name()));
     }
 
     private Given<String> correction(PlannedChannel planned) {
+        if (planned.rule().datum() == Datum.GAUGE && !isBound(planned)) {
+            return Given.withheld("the atmosphere is not known", "run sheet: atmosphere");
+        }
         if (planned.rule().datum() == Datum.GAUGE) {
             return evidence.sheet()
                     .atmospherePascal()

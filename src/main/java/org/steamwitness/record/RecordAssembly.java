@@ -5,11 +5,13 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.steamwitness.evaluate.criteria.Criterion;
 import org.steamwitness.evaluate.criteria.Verdict;
 import org.steamwitness.finding.Finding;
 import org.steamwitness.finding.FindingKind;
 import org.steamwitness.finding.Position;
+import org.steamwitness.plan.Limit;
 import org.steamwitness.plan.Plan;
 import org.steamwitness.plan.RunSheet;
 import org.steamwitness.trace.Reading;
@@ -136,7 +138,18 @@ public final class RecordAssembly {
         return evidence.evaluation().criteria().stream().map(this::criterion).toList();
     }
 
+    /** The plan's limit that a criterion judges, where it has one of its own. */
+    private Optional<Limit> limitOf(Criterion criterion) {
+        List<Limit> limits = evidence.plan().limits();
+        return IntStream.range(0, limits.size())
+                .filter(i -> criterion.id().startsWith(limits.get(i).idAt(i) + "-"))
+                .mapToObj(limits::get)
+                .findFirst();
+    }
+
     private CriterionPart criterion(Criterion criterion) {
+        Optional<Limit> limit = limitOf(criterion);
+        Optional<String> own = limit.flatMap(Limit::source);
         return new CriterionPart(
                 criterion.id(),
                 criterion.what(),
@@ -152,9 +165,13 @@ public final class RecordAssembly {
                 Given.numberOr(criterion.uncertainty(), "the value carries none, or none is stated"),
                 criterion.decision().word(),
                 criterion.why(),
-                evidence.plan().decision().word(),
-                evidence.plan().basis().document(),
-                evidence.plan().basis().edition());
+                limit.flatMap(Limit::decision)
+                        .orElse(evidence.plan().decision())
+                        .word(),
+                own.orElse(evidence.plan().basis().document()),
+                own.isPresent()
+                        ? limit.flatMap(Limit::edition).orElse("not stated")
+                        : evidence.plan().basis().edition());
     }
 
     private Given<Double> atSeconds(Criterion criterion) {

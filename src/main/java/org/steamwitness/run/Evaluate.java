@@ -9,6 +9,7 @@ import java.util.Optional;
 import org.steamwitness.chart.ChartFonts;
 import org.steamwitness.chart.RunChart;
 import org.steamwitness.evaluate.Evaluation;
+import org.steamwitness.evaluate.phase.Cycles;
 import org.steamwitness.finding.Finding;
 import org.steamwitness.finding.FindingKind;
 import org.steamwitness.finding.Position;
@@ -28,6 +29,7 @@ import org.steamwitness.record.RecordAssembly;
 import org.steamwitness.record.RecordPdf;
 import org.steamwitness.record.Template;
 import org.steamwitness.trace.LogClock;
+import org.steamwitness.trace.Stretch;
 import org.steamwitness.trace.Trace;
 
 /** Evaluates one run: log, plan and run sheet in, record out. */
@@ -90,15 +92,38 @@ public final class Evaluate {
             return new Outcome.Refused(unreadable.findings());
         }
         if (intake instanceof Intake.Read read) {
-            return evaluated(plan, sheet, inZone(read.trace(), zone), read);
+            return placed(plan, sheet, inZone(read.trace(), zone), read);
         }
         return new Outcome.Cancelled();
     }
 
-    private Outcome evaluated(Plan plan, RunSheet sheet, Trace trace, Intake.Read read) {
-        progress.step("evaluating " + log.name(), 0.5);
-        BoundPlan.Bound bound = BoundPlan.of(plan, sheet, trace);
+    /** Takes the part of the log that is this run, and sets its clock by the wall's. */
+    private Outcome placed(Plan plan, RunSheet sheet, Trace whole, Intake.Read read) {
         List<Finding> known = new ArrayList<>(read.findings());
+        Trace trace = whole;
+        if (sheet.logPart().isPresent()) {
+            Optional<Trace> part = RunPlace.part(whole, sheet.logPart().get());
+            if (part.isEmpty()) {
+                return new Outcome.Refused(
+                        List.of(RunPlace.outside(whole, sheet.logPart().get())));
+            }
+            trace = part.get();
+        }
+        if (sheet.clocks().isPresent()) {
+            trace = RunPlace.set(trace, sheet.clocks().get());
+            known.add(RunPlace.clockSet(sheet.clocks().get()));
+        }
+        BoundPlan.Bound bound = BoundPlan.of(plan, sheet, trace);
+        List<Stretch> cycles = Cycles.of(trace, bound.plan());
+        if (cycles.size() > 1 && sheet.logPart().isEmpty()) {
+            return new Outcome.Refused(List.of(RunPlace.several(trace, cycles)));
+        }
+        return evaluated(plan, sheet, trace, read, bound, known);
+    }
+
+    private Outcome evaluated(
+            Plan plan, RunSheet sheet, Trace trace, Intake.Read read, BoundPlan.Bound bound, List<Finding> known) {
+        progress.step("evaluating " + log.name(), 0.5);
         known.addAll(bound.findings());
         Evaluation evaluation = Evaluation.of(trace, read.reading(), bound.plan(), known);
         Template template = Template.standard();

@@ -50,6 +50,28 @@ public interface Column {
     }
 
     /**
+     * A part of the column.
+     *
+     * @param from index of the first sample
+     * @param to index of the last sample
+     * @return a view; this column stays as it is
+     */
+    default Column part(int from, int to) {
+        Column read = this;
+        return new Column() {
+            @Override
+            public int size() {
+                return to - from + 1;
+            }
+
+            @Override
+            public double at(int index) {
+                return read.at(from + index);
+            }
+        };
+    }
+
+    /**
      * A column that holds its own copy of the values.
      *
      * @param values samples in SI units, NaN where missing

@@ -20,6 +20,7 @@ import java.util.OptionalDouble;
  */
 public record LogClock(LocalDateTime first, Optional<ZoneOffset> offset, Shows shows) {
 
+    private static final Duration HALF_A_DAY = Duration.ofHours(12);
     private static final double NANOSECONDS = 1e9;
     private static final DateTimeFormatter WRITTEN = DateTimeFormatter.ofPattern("uuuu-MM-dd'T'HH:mm:ss", Locale.ROOT);
 
@@ -133,6 +134,16 @@ public record LogClock(LocalDateTime first, Optional<ZoneOffset> offset, Shows s
     }
 
     /**
+     * The same clock for a part of the log.
+     *
+     * @param seconds from this clock's first sample to the part's first
+     * @return a clock whose first sample is the part's
+     */
+    public LogClock startingAt(double seconds) {
+        return new LogClock(first.plusNanos(StrictMath.round(seconds * NANOSECONDS)), offset, shows);
+    }
+
+    /**
      * The same instants shown by a clock on the wall, for a log that tells less than that.
      *
      * @param wall time on the wall at an instant
@@ -141,6 +152,9 @@ public record LogClock(LocalDateTime first, Optional<ZoneOffset> offset, Shows s
      */
     public LogClock readBeside(LocalTime wall, LocalTime log) {
         Duration ahead = Duration.between(log, wall);
+        if (shows != Shows.ELAPSED && ahead.abs().compareTo(HALF_A_DAY) > 0) {
+            ahead = ahead.isNegative() ? ahead.plusDays(1) : ahead.minusDays(1);
+        }
         Shows shown = shows == Shows.ELAPSED ? Shows.TIME_OF_DAY : shows;
         return new LogClock(first.plus(ahead), offset, shown);
     }

@@ -50,6 +50,25 @@ public final class Trace {
     }
 
     /**
+     * A part of the samples, with a time base that starts at its first one.
+     *
+     * @param from index of the first sample
+     * @param to index of the last sample, not before the first
+     * @return a trace of its own
+     */
+    public Trace part(int from, int to) {
+        double[] own = new double[to - from + 1];
+        for (int i = 0; i < own.length; i++) {
+            own[i] = seconds.at(from + i) - seconds.at(from);
+        }
+        List<Channel> parts = channels.stream()
+                .map(c -> new Channel(c.rule(), c.values().part(from, to)))
+                .toList();
+        return new Trace(
+                clock.startingAt(seconds.at(from)), Column.of(own), Arrays.copyOfRange(lines, from, to + 1), parts);
+    }
+
+    /**
      * The clock that tells dates and times.
      *
      * @return never null

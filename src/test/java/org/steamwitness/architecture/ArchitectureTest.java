@@ -21,7 +21,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 class ArchitectureTest {
 
     /** Classes of the program when somebody last looked, nested ones included. It may only rise. */
-    private static final int LAST_COUNT = 340;
+    private static final int LAST_COUNT = 360;
 
     private static final String ROOT = "org.steamwitness";
     private static final String FIXTURES = ROOT + ".architecture.fixtures";

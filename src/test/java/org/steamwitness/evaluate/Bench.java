@@ -32,6 +32,7 @@ public final class Bench {
     private Hold hold = new Hold(121.1 + 273.15, 124.1 + 273.15, Optional.empty(), 60, List.of("chamber"));
     private List<LethalityAim> lethality = List.of();
     private List<Limit> limits = List.of();
+    private List<String> unheeded = List.of();
     private double longestGap = 10;
     private double scanDelay;
     private DecisionRule decision = new DecisionRule(true, 0.95);
@@ -138,6 +139,11 @@ public final class Bench {
                 channel.sharedUncertainty());
     }
 
+    public Bench unheeding(String... demands) {
+        unheeded = List.of(demands);
+        return this;
+    }
+
     public Bench bridging(double longestGapSeconds) {
         longestGap = longestGapSeconds;
         return this;
@@ -173,6 +179,7 @@ public final class Bench {
                 Optional.of(new SaturationTolerance(1, 2, 10)),
                 lethality,
                 limits,
+                unheeded,
                 decision,
                 longestGap,
                 scanDelay,

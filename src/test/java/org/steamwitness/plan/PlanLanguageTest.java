@@ -6,12 +6,18 @@ import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.Set;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
+import org.steamwitness.finding.FindingKind;
 import org.steamwitness.quantity.Datum;
 import org.steamwitness.quantity.PressureReading;
+import org.steamwitness.trace.Delimiter;
+import org.steamwitness.trace.TimeForm;
+import org.steamwitness.trace.Told;
 
 class PlanLanguageTest {
 
@@ -57,10 +63,10 @@ class PlanLanguageTest {
         Chamber chamber = plan.chamber().orElseThrow();
         assertThat(chamber.raisedInside()).isFalse();
         assertThat(chamber.volumeCubicMetre()).hasValue(1.9);
-        assertThat(chamber.metal())
-                .contains(new Chamber.Metal(640, Chamber.Material.STAINLESS_STEEL, List.of("chamber")));
+        assertThat(chamber.metal()).contains(new Chamber.Metal(640, Material.STAINLESS_STEEL, List.of("chamber")));
         assertThat(chamber.load())
-                .contains(new Chamber.Load(410, 3550, List.of("can-1"), Chamber.LoadProbes.COLD_SPOT));
+                .contains(new Chamber.Load(
+                        new LoadHeat.Stated(410, 3550), List.of("can-1"), Chamber.LoadProbes.COLD_SPOT));
         assertThat(chamber.maximumPressure()).contains(new PressureReading(300_000, Datum.GAUGE));
         assertThat(plan.atmosphere()).isEqualTo(new AtmosphereSource.Altitude(350, "350 m"));
         assertThat(plan.channels()).extracting(PlannedChannel::required).containsExactly(true, true, false);
@@ -175,20 +181,22 @@ class PlanLanguageTest {
             what: come-up-time, at-least: 3 min, at-most: 12 min           | come-up-time, at least 3 min, at most 12 min
             what: process-time, at-least: 42 min                           | process-time, at least 42 min
             what: holding-time, at-most: 60 min                            | holding-time, at most 60 min
-            what: temperature, phase: hold, channels: [chamber], which: mean, at-most: 122 degC | temperature, hold, chamber, at most 122 degC
+            what: temperature, phase: hold, channels: [chamber], which: mean, at-most: 122 degC | temperature, hold, chamber, mean, at most 122 degC
             what: pressure, phase: cooling, at-least: 1.0 bar(g), at-most: 1.4 bar(g) | pressure, cooling, at least 1.0 bar(g), at most 1.4 bar(g)
             'what: spread, places: [reference, product], phase: hold, at-most: 1.5 K, alert: 1.0 K' | spread, hold, reference, product, at most 1.5 K
             what: recorder-against-indicating, at-most: 0.5 K              | recorder-against-indicating, at most 0.5 K
-            what: probe-against-reference, over: 1 min, at-most: 0.5 K     | probe-against-reference, at most 0.5 K
+            what: probe-against-reference, from: 0 s, until: 60 s, at-most: 0.5 K     | probe-against-reference, at most 0.5 K
             what: pulses, at-least: 4                                      | pulses, at least 4
-            what: pulses, at-most: 50 mbar(a)                              | pulses, at most 50 mbar(a)
+            what: pulse-depth, at-most: 50 mbar(a)                         | pulse-depth, at most 50 mbar(a)
+            what: pulse-peak, at-least: 1.5 bar(a)                         | pulse-peak, at least 1.5 bar(a)
+            what: cook-value, at-most: 90 min                              | cook-value, at most 90 min
             what: equilibration, at-most: 15 s                             | equilibration, at most 15 s
             what: temperature-rate, over: 1 min, at-most: 2 K/min          | temperature-rate, at most 2 K/min
             what: pressure-rate, over: 30 s, phase: cooling, at-most: 0.3 bar/min | pressure-rate, cooling, at most 0.3 bar/min
             what: overpressure, at-least: 0.2 bar                          | overpressure, at least 0.2 bar
             what: saturation, phase: heating, at-most: 2 K                 | saturation, heating, at most 2 K
             what: lethality, at-least: 6 min                               | lethality, at least 6 min
-            what: air-leakage, over: 10 min, at-most: 1.3 mbar/min         | air-leakage, at most 1.3 mbar/min
+            what: air-leakage, over: 10 min, settle: 5 min, start-pressure: 7 kPa(a), at-most: 1.3 mbar/min         | air-leakage, at most 1.3 mbar/min
             what: drying, at-least: 10 min                                 | drying, at least 10 min
             what: drying, at-most: 60 mbar(a)                              | drying, at most 60 mbar(a)
             what: cooling-end-temperature, at-most: 40 degC                | cooling-end-temperature, at most 40 degC
@@ -226,6 +234,12 @@ class PlanLanguageTest {
             'what: spread, places: [reference], channels: [chamber], at-most: 1 K' | limits[0].channels: places are named too; expected one of both
             'what: spread, channels: [drain], at-most: 1 K'      | limits: spread.channels names "drain", which is not among the channels
             what: spread, which: most, at-most: 1 K              | limits[0].which: "most" is not one of: each, any, mean, end
+            what: pulses, at-most: 50 mbar(a)                    | limits[0].at-most: "50 mbar(a)" is not a whole number such as 4
+            'what: spread, at-most: 1 K, alert: 2 K'             | limits[0]: the alert must lie inside the limit
+            'what: spread, at-least: 0 K, at-most: 1 K, alert: 0.5 K' | limits[0]: an alert needs either at-least or at-most beside it
+            'what: probe-against-reference, from: 60 s, until: 60 s, at-most: 1 K' | limits[0]: from must come before until
+            what: spread, settle: 5 min, at-most: 1 K            | limits[0].settle: unknown key; *
+            what: cook-value, name: C100, at-most: 90 min        | limits: name is "C100", which is no lethality of this plan
             what: pulses, at-least: four                         | limits[0].at-least: "four" is not a whole number such as 4
             'what: spread, at-most: 1 K, decision: {rule: guarded, conformance: 95 %}' | channels: a guarded decision needs the uncertainty of channel "chamber"; *
             """)
@@ -236,29 +250,101 @@ class PlanLanguageTest {
     }
 
     static final String READING = """
-            reading: {encoding: windows-1252, delimiter: semicolon, decimal-mark: comma, thousands-mark: none,
-              header-line: 4, time-columns: [Date, Time], time-format: "dd.MM.yyyy HH:mm:ss", quoted-line-breaks: no,
+            reading: {encoding: windows-1252, delimiter: semicolon, decimal-mark: comma, thousands-mark: space,
+              header-line: 4, time-columns: [Date, Time], time-format: day-month-year, quoted-line-breaks: no,
               missing-codes: ["---"], largest-refused-share: 1 %}
             """;
 
     @Test
     void readsHowALogIsWritten() {
         assertThat(read(FULL + READING).value().orElseThrow().reading())
-                .contains(new ReadingSection(
+                .isEqualTo(new Told(
                         Optional.of("windows-1252"),
-                        Optional.of("semicolon"),
-                        Optional.of("comma"),
-                        Optional.of("none"),
-                        Optional.of(4),
+                        Optional.of(Delimiter.SEMICOLON),
+                        Optional.of(','),
+                        Optional.of(' '),
+                        OptionalInt.of(4),
                         List.of("Date", "Time"),
-                        Optional.of("dd.MM.yyyy HH:mm:ss"),
-                        Optional.of(false),
-                        List.of("---"),
+                        Optional.of(TimeForm.DAY_MONTH_YEAR),
+                        false,
+                        Set.of("---"),
                         OptionalDouble.of(0.01)));
         assertThat(messages(read(FULL + READING.replace("decimal-mark: comma", "decimal-mark: dot"))))
                 .containsExactly("p.yaml:34:71: reading.decimal-mark: \"dot\" is not one of: full stop, comma");
-        assertThat(messages(read(FULL + READING.replace("thousands-mark: none", "thousands-mark: comma"))))
+        assertThat(messages(read(FULL + READING.replace("thousands-mark: space", "thousands-mark: comma"))))
                 .containsExactly("p.yaml:34:10: reading: decimal-mark and thousands-mark must differ");
+    }
+
+    /** Without quotes YAML would take the mark for the start of a key; columns stay those of the file. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            status: in-force       | status: ?              | p.yaml:5:9: status: open place: fill in one of: draft, in-force
+            duration: 42 min       | duration: ?            | p.yaml:26:59: hold[0].duration: open place: fill in a duration such as 42 min
+            place: product         | place: ?               | p.yaml:23:61: channels[2].place: open place: fill in one of: reference, chamber, drain, free-space, load, product, jacket, wall, water, supply, ambient
+            'temperature: [can-1]' | 'temperature: [?]'     | p.yaml:15:69: chamber.load.temperature[0]: open place: fill in text
+            mark-agreement: 60 s   | 'mark-agreement: ?   # ask' | p.yaml:32:17: mark-agreement: open place: fill in a duration such as 60 s
+            title: Retort R2       | 'title: What is it ?'  | ''
+            title: Retort R2       | 'title: "a: ?, b"'     | ''
+            """)
+    void aBareQuestionMarkIsAnOpenPlaceToo(String from, String to, String message) {
+        assertThat(FULL).contains(from);
+        AsWritten<Plan> read = read(FULL.replace(from, to));
+        assertThat(messages(read)).isEqualTo(message.isEmpty() ? List.of() : List.of(message));
+        assertThat(read.problems()).allMatch(problem -> problem.kind() == FindingKind.OPEN_PLACE);
+        read.value().ifPresent(plan -> assertThat(plan.title()).contains("?"));
+    }
+
+    /** A mistake in one key must not make its neighbours unknown. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            'what: spread, phase: simmer, at-most: 1 K, source: TD-1'       | limits[0].phase: "simmer" is not one of: *
+            'what: air-leakage, over: "?", settle: 5 min, at-most: 1 Pa/s'  | limits[0].over: open place: *
+            'what: air-leakage, over: 1 min, settle: 5, at-most: 1 Pa/s, source: TD-1' | limits[0].settle: "5" is not a duration *
+            """)
+    void oneMistakeGivesOneMessage(String limit, String message) {
+        String wanted =
+                "p.yaml:[0-9:]+ " + java.util.regex.Pattern.quote(message).replace("*", "\\E.*\\Q");
+        assertThat(messages(read(FULL + "limits: [{" + limit + "}]\n")))
+                .singleElement()
+                .asString()
+                .matches(wanted);
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            'mass: 410 kg, composition: {water: 50 %, fat: 20 %}' | chamber.load: the shares of the composition make up 70.0 %; expected 98 % to 102 %
+            'mass: 410 kg'                                        | chamber.load: expected one of: specific-heat, composition, materials
+            'mass: heavy, specific-heat: 3.55 kJ/(kg K)'          | chamber.load.mass: "heavy" is not a mass such as 640 kg; *
+            'materials: [{mass: 2 kg, material: mud}]'            | chamber.load.materials[0].material: "mud" is not one of: *
+            """)
+    void namesMistakesOfALoad(String written, String message) {
+        String wanted =
+                "p.yaml:[0-9:]+ " + java.util.regex.Pattern.quote(message).replace("*", "\\E.*\\Q");
+        String text = FULL.replace("mass: 410 kg, specific-heat: 3.55 kJ/(kg K)", written);
+        assertThat(text).isNotEqualTo(FULL);
+        assertThat(messages(read(text))).singleElement().asString().matches(wanted);
+    }
+
+    @Test
+    void readsOtherQuantitiesInTheirUnits() {
+        String text = FULL.replace(
+                "required: yes}",
+                "required: yes}\n  - {name: w, column: W, quantity: flow, place: water, unit: kg/h}"
+                        + "\n  - {name: l, column: L, quantity: level, place: water, unit: mm}"
+                        + "\n  - {name: n, column: N, quantity: rotation, place: load, unit: rpm}"
+                        + "\n  - {name: v, column: V, quantity: state, place: drain, unit: 0/1}");
+        Plan plan = read(text).value().orElseThrow();
+        assertThat(plan.channels().subList(1, 5))
+                .extracting(channel -> channel.rule().toSi().applyAsDouble(3600))
+                .containsExactly(1.0, 3.6, 60.0, 3600.0);
+        assertThat(messages(read(text.replace("unit: mm", "unit: inch"))))
+                .singleElement()
+                .asString()
+                .endsWith("channels[2].unit: \"inch\" is not one of: m, mm");
+        assertThat(messages(read(text.replace("unit: mm", "unit: mm, lag: {value: 6 s, uncertainty: 2 s}"))))
+                .singleElement()
+                .asString()
+                .contains("channels[2].lag: unknown key");
     }
 
     @Test

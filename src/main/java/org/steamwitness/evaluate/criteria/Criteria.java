@@ -30,6 +30,10 @@ public final class Criteria {
         SaturationAgreement.of(saturation, phases, plan.longestGapSeconds()).ifPresent(criteria::add);
         lethality.stream().map(LethalityLimits::of).forEach(criteria::addAll);
         criteria.addAll(UnjudgedLimits.of(plan.limits()));
-        return List.copyOf(criteria);
+        if (plan.unheeded().isEmpty()) {
+            return List.copyOf(criteria);
+        }
+        String reason = "not decided, since this version does not heed " + String.join(", ", plan.unheeded());
+        return criteria.stream().map(criterion -> criterion.leftOpen(reason)).toList();
     }
 }

@@ -48,6 +48,32 @@ public record Criterion(
         return OptionalDouble.of(atLeast ? above : -above);
     }
 
+    /**
+     * The same, left open.
+     *
+     * @param reason why it can't be decided, in words
+     * @return undecided if it was met or not met; otherwise unchanged
+     */
+    public Criterion leftOpen(String reason) {
+        if (decision != Decision.MET && decision != Decision.NOT_MET) {
+            return this;
+        }
+        return new Criterion(
+                id,
+                subject,
+                what,
+                where,
+                phase,
+                unit,
+                value,
+                limit,
+                atLeast,
+                uncertainty,
+                index,
+                Decision.UNDECIDED,
+                why + "; " + reason);
+    }
+
     /** What a criterion judges. */
     public enum Subject {
         /** Holding time or a temperature of the process: the heart of a verdict. */

@@ -385,6 +385,12 @@ class CriteriaTest {
                 LimitKind.COME_UP_TIME,
                 Measure.DURATION,
                 new Limit.Scope(Optional.empty(), List.of(), List.of(), Limit.Which.EACH, OptionalDouble.empty()),
+                new Limit.Terms(
+                        Optional.empty(),
+                        OptionalDouble.empty(),
+                        OptionalDouble.empty(),
+                        OptionalDouble.empty(),
+                        Optional.empty()),
                 Optional.of(new Limit.Figure(60, Datum.ABSOLUTE, "1 min")),
                 Optional.of(new Limit.Figure(600, Datum.ABSOLUTE, "10 min")),
                 List.of(),
@@ -402,11 +408,31 @@ class CriteriaTest {
                 .containsExactly("limit-1-come-up-time-least", "limit-1-come-up-time-most");
         assertThat(added).allSatisfy(c -> {
             assertThat(c.what()).isEqualTo("come-up-time, at least 1 min, at most 10 min");
-            assertThat(c.why()).isEqualTo("this version does not judge it; limit from study TD-07");
+            assertThat(c.why()).isEqualTo("not judged by this version");
             assertThat(c.decision()).isEqualTo(Decision.UNDECIDED);
             assertThat(c.value()).isEmpty();
             assertThat(c.phase()).isEqualTo("whole run");
         });
+    }
+
+    /** A retort's rules may find a fault where another process has none, so neither met nor not met may stand. */
+    @ParameterizedTest
+    @CsvSource({"55, MET", "900, NOT_MET"})
+    void nothingIsDecidedWhereWhatIsAskedForIsNotHeeded(double required, Decision otherwise) {
+        double[] celsius = held(20);
+        celsius[0] = 100;
+        celsius[19] = 60;
+        Bench bench = Bench.every(5, 20)
+                .holding(required)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius), Bench.pressure(1, steam(20)));
+        assertThat(evaluate(bench).criteria().get(0).decision()).isEqualTo(otherwise);
+        Evaluation evaluation = evaluate(bench.unheeding("process: cooker"));
+        assertThat(evaluation.criteria())
+                .extracting(Criterion::decision)
+                .doesNotContain(Decision.MET, Decision.NOT_MET);
+        assertThat(evaluation.criteria().get(0).why())
+                .endsWith("; not decided, since this version does not heed process: cooker");
+        assertThat(evaluation.verdict().outcome()).isEqualTo(Outcome.UNDECIDED);
     }
 
     private static Outcome outcome(List<Criterion> criteria, List<Finding> findings) {
