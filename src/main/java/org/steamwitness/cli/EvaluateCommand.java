@@ -5,7 +5,6 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.steamwitness.finding.Finding;
 import org.steamwitness.quantity.Progress;
 import org.steamwitness.run.Evaluate;
 import org.steamwitness.run.Outcome;
@@ -87,22 +86,23 @@ final class EvaluateCommand implements Callable<Integer> {
     }
 
     private ExitCode one(RunFiles files) {
+        Voice voice = new Voice(spec.commandLine());
         try {
             Outcome outcome = new Evaluate(files.log(), files.plan(), files.sheet(), progress).outcome();
             if (outcome instanceof Outcome.Evaluated evaluated) {
                 return written(files, evaluated);
             }
             if (outcome instanceof Outcome.Refused refused) {
-                refused.findings().forEach(this::tell);
+                refused.findings().forEach(voice::tell);
                 return ExitCode.NOT_EVALUATED;
             }
-            trouble("cancelled; no record was written for " + files.name());
+            voice.trouble("cancelled; no record was written for " + files.name());
             return ExitCode.CANCELLED;
         } catch (RunFiles.MissingFileException missing) {
-            trouble(missing.getMessage());
+            voice.trouble(missing.getMessage());
             return ExitCode.WRONG_USAGE;
         } catch (RecordFolder.NotWrittenException notWritten) {
-            trouble(notWritten.getMessage());
+            voice.trouble(notWritten.getMessage());
             return ExitCode.NOT_WRITTEN;
         }
     }
@@ -114,16 +114,5 @@ final class EvaluateCommand implements Callable<Integer> {
         page.print("Record       " + written.pdf() + "\n             " + written.json() + "\n");
         page.flush();
         return ExitCode.ofOutcome(evaluated.record().verdict().outcome());
-    }
-
-    private void tell(Finding finding) {
-        String place = finding.position().text();
-        trouble((place.isEmpty() ? "" : place + ": ") + finding.text() + "\n    " + finding.remedy());
-    }
-
-    private void trouble(String message) {
-        PrintWriter err = spec.commandLine().getErr();
-        err.print(Harmless.text(message) + "\n");
-        err.flush();
     }
 }

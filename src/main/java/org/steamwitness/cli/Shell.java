@@ -29,6 +29,9 @@ final class Shell {
     private CommandLine commandLine() {
         return new CommandLine(new Steamwitness())
                 .addSubcommand(new EvaluateCommand(progress))
+                .addSubcommand(new ReadCommand(progress))
+                .addSubcommand(new PlanCommand(progress))
+                .addSubcommand(new RunCommand())
                 .setOut(out)
                 .setErr(err)
                 .setUsageHelpWidth(100)

@@ -11,6 +11,7 @@ import org.steamwitness.trace.QuantityKind;
  * @param position 1 for the first
  * @param header as written; "#3" where there is none
  * @param name the header without its unit
+ * @param numeric whether its fields are numbers
  * @param quantity what it may measure
  * @param unit the unit of its numbers, as plans write it
  * @param datum what a pressure may be counted from
@@ -20,12 +21,13 @@ public record FoundColumn(
         int position,
         String header,
         String name,
+        boolean numeric,
         Optional<QuantityKind> quantity,
         Optional<String> unit,
         Optional<Datum> datum,
         Optional<Place> place) {
 
-    static FoundColumn of(int index, String header, String unitBelow) {
+    static FoundColumn of(int index, String header, boolean numeric, String unitBelow) {
         if (header.isBlank()) {
             String name = "#" + (index + 1);
             Optional<UnitText> unit = UnitText.of(unitBelow);
@@ -33,6 +35,7 @@ public record FoundColumn(
                     index + 1,
                     name,
                     name,
+                    numeric,
                     unit.map(UnitText::quantity),
                     unit.map(UnitText::symbol),
                     unit.flatMap(UnitText::datum),
@@ -43,6 +46,7 @@ public record FoundColumn(
                 index + 1,
                 header.strip(),
                 text.name(),
+                numeric,
                 text.quantity(),
                 text.unit().map(UnitText::symbol),
                 text.datum(),

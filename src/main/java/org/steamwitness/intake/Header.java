@@ -79,7 +79,7 @@ record Header(List<String> lines, List<FoundColumn> columns, boolean named, Gues
         for (int c = 0; c < block.width(); c++) {
             String name = c < names.map(List::size).orElse(0) ? names.get().get(c) : "";
             String unit = c < units.map(List::size).orElse(0) ? units.get().get(c) : inCell(block, c);
-            columns.add(FoundColumn.of(c, name, unit));
+            columns.add(FoundColumn.of(c, name, block.mostly(c, FieldKind.NUMBER), unit));
         }
         List<String> lines = new ArrayList<>();
         if (namesLine > 0) {

@@ -16,8 +16,15 @@ public sealed interface Intake {
      * @param findings what the reader must know about that
      * @param guesses how the log's form came to be known
      * @param columns all columns of the log
+     * @param times indices of the columns that tell the time
      */
-    record Read(Trace trace, Reading reading, List<Finding> findings, List<Guess> guesses, List<FoundColumn> columns)
+    record Read(
+            Trace trace,
+            Reading reading,
+            List<Finding> findings,
+            List<Guess> guesses,
+            List<FoundColumn> columns,
+            List<Integer> times)
             implements Intake {}
 
     /**

@@ -36,15 +36,27 @@ final class LogIntake {
     private final LogForm form;
     private final ReadingRules rules;
     private final Optional<ZoneId> zone;
+    private final boolean planned;
     private final Refusals refusals = new Refusals();
     private final List<Finding> findings = new ArrayList<>();
 
-    LogIntake(String file, LogText text, LogForm form, ReadingRules rules, Optional<ZoneId> zone) {
+    /**
+     * Prepares the act.
+     *
+     * @param file base name of the log
+     * @param text its text
+     * @param form how it is written
+     * @param rules which columns are wanted
+     * @param zone zone of its clock
+     * @param planned whether a plan wants the columns, so that none may be empty
+     */
+    LogIntake(String file, LogText text, LogForm form, ReadingRules rules, Optional<ZoneId> zone, boolean planned) {
         this.file = file;
         this.text = text;
         this.form = form;
         this.rules = rules;
         this.zone = zone;
+        this.planned = planned;
     }
 
     Intake read(Progress progress) {
@@ -77,7 +89,12 @@ final class LogIntake {
         refused(lines[lines.length - 1]);
         unread(choice.unread());
         return new Intake.Read(
-                trace, reading(choice.unread(), lines), List.copyOf(findings), form.guesses(), form.columns());
+                trace,
+                reading(choice.unread(), lines),
+                List.copyOf(findings),
+                form.guesses(),
+                form.columns(),
+                form.times());
     }
 
     /** As many as the mean length of the first rows lets expect, and a few more. */
@@ -125,6 +142,9 @@ final class LogIntake {
     }
 
     private Optional<Finding> empty(Samples samples) {
+        if (!planned) {
+            return Optional.empty();
+        }
         return samples.emptyChannel()
                 .map(rule -> new Finding(
                         FindingKind.CHANNEL_EMPTY,

@@ -44,7 +44,7 @@ public final class LogReader {
      * @return its trace and how it was read, or why it can't be evaluated
      */
     public Intake read(byte[] bytes) {
-        return opened(bytes, (text, form) -> new LogIntake(file, text, form, rules, zone).read(progress));
+        return opened(bytes, (text, form) -> new LogIntake(file, text, form, rules, zone, true).read(progress));
     }
 
     /**
@@ -57,7 +57,7 @@ public final class LogReader {
     public Intake survey(byte[] bytes) {
         return opened(bytes, (text, form) -> {
             ReadingRules suggested = new ReadingRules(Suggestion.rules(form), rules.told());
-            return new LogIntake(file, text, form, suggested, zone).read(progress);
+            return new LogIntake(file, text, form, suggested, zone, false).read(progress);
         });
     }
 

@@ -10,7 +10,10 @@ import org.steamwitness.quantity.TemperatureUnit;
 import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.ReadingRules.ColumnRule;
 
-/** The columns of a log that can be read by what their headers say, each as a channel named as its header is. */
+/**
+ * The columns of a log that hold numbers, each as a channel named as its header is, in the unit that the header names.
+ * Without a unit the numbers stay as they are and nothing is taken for a fault.
+ */
 final class Suggestion {
 
     private Suggestion() {}
@@ -26,17 +29,22 @@ final class Suggestion {
     }
 
     private static Optional<ColumnRule> rule(FoundColumn column) {
-        if (column.quantity().isEmpty() || column.unit().isEmpty()) {
+        if (!column.numeric()) {
             return Optional.empty();
+        }
+        QuantityKind kind = column.quantity().orElse(QuantityKind.STATE);
+        if (column.unit().isEmpty()) {
+            return Optional.of(new ColumnRule(
+                    column.name(), "#" + column.position(), QuantityKind.STATE, "", Datum.ABSOLUTE, number -> number));
         }
         String unit = column.unit().get();
         return Optional.of(new ColumnRule(
                 column.name(),
                 "#" + column.position(),
-                column.quantity().get(),
+                kind,
                 unit,
-                column.datum().orElse(column.quantity().get() == QuantityKind.PRESSURE ? Datum.GAUGE : Datum.ABSOLUTE),
-                toSi(column.quantity().get(), unit)));
+                column.datum().orElse(kind == QuantityKind.PRESSURE ? Datum.GAUGE : Datum.ABSOLUTE),
+                toSi(kind, unit)));
     }
 
     private static DoubleUnaryOperator toSi(QuantityKind quantity, String unit) {

@@ -38,6 +38,24 @@ public final class RunFiles {
     }
 
     /**
+     * Where the plan lies or would lie.
+     *
+     * @return its path
+     */
+    public Path planPath() {
+        return plan;
+    }
+
+    /**
+     * Where the run sheet lies or would lie.
+     *
+     * @return its path
+     */
+    public Path sheetPath() {
+        return sheet;
+    }
+
+    /**
      * Reads the log.
      *
      * @return its bytes
@@ -77,7 +95,16 @@ public final class RunFiles {
         return dot > 0 ? file.substring(0, dot) : file;
     }
 
-    private static NamedBytes read(Path path, String role, String remedy) throws MissingFileException {
+    /**
+     * Reads any file.
+     *
+     * @param path where it lies
+     * @param role what it is, for messages
+     * @param remedy what to do if it is not there, for messages
+     * @return its bytes
+     * @throws MissingFileException if it can't be read
+     */
+    public static NamedBytes read(Path path, String role, String remedy) throws MissingFileException {
         if (!Files.exists(path)) {
             throw new MissingFileException(role + " " + path + " does not exist; " + remedy);
         }

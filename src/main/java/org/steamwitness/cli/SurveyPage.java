@@ -1,0 +1,156 @@
+package org.steamwitness.cli;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.steamwitness.intake.FoundColumn;
+import org.steamwitness.intake.Guess;
+import org.steamwitness.quantity.Datum;
+import org.steamwitness.quantity.Printed;
+import org.steamwitness.run.LogSurvey;
+import org.steamwitness.run.LogSurvey.ColumnSurvey;
+import org.steamwitness.run.LogSurvey.Figures;
+import org.steamwitness.trace.Place;
+import org.steamwitness.trace.QuantityKind;
+import org.steamwitness.trace.Reading.RefusedRows;
+import org.steamwitness.trace.Trace;
+
+/** How a log was understood, as lines of text. */
+final class SurveyPage {
+
+    private static final int MOST_LISTED = 12;
+    private static final int NAME_WIDTH = 24;
+
+    private final LogSurvey survey;
+    private final List<String> lines = new ArrayList<>();
+
+    private SurveyPage(LogSurvey survey) {
+        this.survey = survey;
+    }
+
+    static List<String> of(String name, LogSurvey survey) {
+        return new SurveyPage(survey).page(name);
+    }
+
+    private List<String> page(String name) {
+        Trace trace = survey.trace();
+        lines.add("Log          " + name);
+        lines.add("Rows         " + trace.size() + ", from line " + trace.lineOf(0) + " to line "
+                + trace.lineOf(trace.size() - 1));
+        lines.add("Time         " + instant(0) + " to " + instant(trace.lastSeconds()) + ", every "
+                + Printed.fixed(trace.interval().medianSeconds(), 2) + " s, longest "
+                + Printed.fixed(trace.interval().longestSeconds(), 2) + " s");
+        lines.add("");
+        for (Guess guess : survey.guesses()) {
+            lines.add(padded(guess.what(), 13) + guess.value() + " ("
+                    + guess.basis().word() + ": " + guess.evidence() + ")");
+        }
+        lines.add("");
+        columns();
+        refused();
+        findings();
+        return lines;
+    }
+
+    private String instant(double seconds) {
+        return survey.trace()
+                .clock()
+                .localAt(seconds)
+                .map(l -> l.replace('T', ' '))
+                .orElseGet(() -> Printed.duration(seconds) + " since the start");
+    }
+
+    private void columns() {
+        lines.add(padded("column", NAME_WIDTH + 4)
+                + padded("quantity", 13)
+                + padded("unit", 14)
+                + padded("place?", 11)
+                + right("lowest", 10)
+                + right("highest", 10)
+                + right("missing", 9)
+                + right("step", 9)
+                + right("noise", 9));
+        for (ColumnSurvey column : survey.columns()) {
+            FoundColumn found = column.found();
+            String start = padded("#" + found.position(), 4) + padded(cut(found.header()), NAME_WIDTH);
+            lines.add(
+                    column.figures().isEmpty()
+                            ? start + column.why()
+                            : start
+                                    + padded(
+                                            found.quantity()
+                                                    .map(QuantityKind::word)
+                                                    .orElse("?"),
+                                            13)
+                                    + padded(unit(column), 14)
+                                    + padded(found.place().map(Place::word).orElse("?"), 11)
+                                    + figures(column.figures().get()));
+        }
+        boolean byStart = survey.columns().stream().anyMatch(c -> c.datumBasis().equals("by where it starts"));
+        if (byStart) {
+            lines.add("             * counted from so, by where the pressure starts; check it");
+        }
+        lines.add(
+                "             ? is for you to say in a plan; quantities, units and places here are by the headers' words");
+    }
+
+    private static String unit(ColumnSurvey column) {
+        String unit = column.found().unit().orElse("?");
+        boolean pressure = column.found()
+                .quantity()
+                .filter(q -> q == QuantityKind.PRESSURE)
+                .isPresent();
+        if (!pressure) {
+            return unit;
+        }
+        return unit + " " + column.datum().map(Datum::word).orElse("?")
+                + (column.datumBasis().equals("by where it starts") ? "*" : "");
+    }
+
+    private static String figures(Figures figures) {
+        return right(Printed.fixed(figures.lowest(), 2), 10)
+                + right(Printed.fixed(figures.highest(), 2), 10)
+                + right(Integer.toString(figures.missing()), 9)
+                + right(small(figures.resolution()), 9)
+                + right(small(figures.noise()), 9);
+    }
+
+    private static String small(OptionalDouble value) {
+        return value.isPresent() ? Printed.fixed(value.getAsDouble(), 4) : "–";
+    }
+
+    private void refused() {
+        List<RefusedRows> ranges = survey.reading().refused();
+        lines.add("");
+        lines.add("Refused      "
+                + (ranges.isEmpty() ? "nothing" : survey.reading().refusedRows() + " rows or fields"));
+        for (RefusedRows range : ranges.subList(0, Math.min(MOST_LISTED, ranges.size()))) {
+            String where = range.fromLine() == range.toLine()
+                    ? "line " + range.fromLine()
+                    : "lines " + range.fromLine() + " to " + range.toLine();
+            lines.add("  " + where + ": " + range.column() + ": " + range.reason());
+        }
+        if (ranges.size() > MOST_LISTED) {
+            lines.add("  and " + (ranges.size() - MOST_LISTED) + " ranges more");
+        }
+    }
+
+    private void findings() {
+        survey.findings().stream()
+                .filter(f -> !f.kind().word().equals("rows-refused"))
+                .limit(MOST_LISTED)
+                .forEach(f -> lines.add("Note         " + f.text() + " " + f.remedy()));
+    }
+
+    private static String cut(String header) {
+        return header.length() < NAME_WIDTH ? header : header.substring(0, NAME_WIDTH - 2) + "…";
+    }
+
+    private static String padded(String text, int width) {
+        return text + " ".repeat(Math.max(1, width - text.length()));
+    }
+
+    private static String right(String text, int width) {
+        return " ".repeat(Math.max(1, width - text.length())) + text;
+    }
+}
