@@ -7,22 +7,23 @@ import org.steamwitness.trace.QuantityKind;
 
 /** Units of logged quantities that are neither temperatures nor pressures. */
 enum PlainUnit {
-    KILOGRAM_PER_HOUR(QuantityKind.FLOW, "kg/h", number -> number / 3600),
-    KILOGRAM_PER_MINUTE(QuantityKind.FLOW, "kg/min", number -> number / 60),
-    METRE(QuantityKind.LEVEL, "m", number -> number),
-    MILLIMETRE(QuantityKind.LEVEL, "mm", number -> number / 1000),
-    PER_MINUTE(QuantityKind.ROTATION, "1/min", number -> number / 60),
-    RPM(QuantityKind.ROTATION, "rpm", number -> number / 60),
-    OFF_ON(QuantityKind.STATE, "0/1", number -> number);
+    KILOGRAM_PER_HOUR(QuantityKind.FLOW, "kg/h", 3600),
+    KILOGRAM_PER_MINUTE(QuantityKind.FLOW, "kg/min", 60),
+    METRE(QuantityKind.LEVEL, "m", 1),
+    MILLIMETRE(QuantityKind.LEVEL, "mm", 1000),
+    PER_MINUTE(QuantityKind.ROTATION, "1/min", 60),
+    RPM(QuantityKind.ROTATION, "rpm", 60),
+    OFF_ON(QuantityKind.STATE, "0/1", 1);
 
     private final QuantityKind kind;
     private final String symbol;
-    private final DoubleUnaryOperator toSi;
+    /** How many of the unit are one of the SI unit. */
+    private final int parts;
 
-    PlainUnit(QuantityKind kind, String symbol, DoubleUnaryOperator toSi) {
+    PlainUnit(QuantityKind kind, String symbol, int parts) {
         this.kind = kind;
         this.symbol = symbol;
-        this.toSi = toSi;
+        this.parts = parts;
     }
 
     String symbol() {
@@ -30,7 +31,7 @@ enum PlainUnit {
     }
 
     DoubleUnaryOperator toSi() {
-        return toSi;
+        return number -> number / parts;
     }
 
     static List<PlainUnit> of(QuantityKind kind) {
