@@ -4,14 +4,11 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.steamwitness.plan.Preset;
-import org.steamwitness.plan.PublishedSchema;
 import org.steamwitness.quantity.Progress;
 import org.steamwitness.run.Drafts;
 import org.steamwitness.run.LogSurvey;
 import org.steamwitness.run.ReadLog;
 import org.steamwitness.run.RunFiles;
-import org.steamwitness.trace.Told;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
@@ -59,14 +56,11 @@ final class PlanCommand implements Callable<Integer> {
                     Optional<Path> out,
             @Option(names = "--replace", description = "Replace a file that is there.") boolean replace) {
         Voice voice = new Voice(spec.commandLine());
-        Preset preset = Preset.named(process)
-                .orElseThrow(() -> new ParameterException(
-                        spec.commandLine(), "no preset is named \"" + process + "\"; see: steamwitness plan presets"));
         try {
             Optional<LogSurvey> survey = Optional.empty();
             if (log.isPresent()) {
                 RunFiles files = new RunFiles(log.get(), Optional.empty(), Optional.empty());
-                ReadLog.Outcome outcome = new ReadLog(files.log(), Told.NOTHING, progress).outcome();
+                ReadLog.Outcome outcome = new ReadLog(files.log(), Optional.empty(), progress).outcome();
                 if (outcome instanceof ReadLog.Outcome.Refused refused) {
                     refused.findings().forEach(voice::tell);
                     return ExitCode.NOT_EVALUATED.code();
@@ -78,15 +72,16 @@ final class PlanCommand implements Callable<Integer> {
             }
             Optional<Path> target =
                     out.or(() -> log.map(l -> new RunFiles(l, Optional.empty(), Optional.empty()).planPath()));
-            return written(Drafts.plan(preset, survey), target, replace, "steamwitness plan check ");
+            String text = Drafts.plan(process, survey)
+                    .orElseThrow(() -> new ParameterException(
+                            spec.commandLine(),
+                            "no preset is named \"" + process + "\"; see: steamwitness plan presets"));
+            return Written.of(spec.commandLine(), text, target, replace, "steamwitness plan check ")
+                    .code();
         } catch (RunFiles.MissingFileException missing) {
             voice.trouble(missing.getMessage());
             return ExitCode.WRONG_USAGE.code();
         }
-    }
-
-    private int written(String text, Optional<Path> target, boolean replace, String next) {
-        return Written.of(spec.commandLine(), text, target, replace, next).code();
     }
 
     @Command(name = "check", description = "Say what is wrong or open in plans.", mixinStandardHelpOptions = true)
@@ -100,14 +95,14 @@ final class PlanCommand implements Callable<Integer> {
             description = "Print the JSON Schema of plans, for editors that check while people type.",
             mixinStandardHelpOptions = true)
     Integer schema(@Option(names = "--run", description = "Print that of run sheets.") boolean run) {
-        spec.commandLine().getOut().print(run ? PublishedSchema.ofRunSheet() : PublishedSchema.ofPlan());
+        spec.commandLine().getOut().print(Drafts.schema(run));
         spec.commandLine().getOut().flush();
         return ExitCode.MET.code();
     }
 
     @Command(name = "presets", description = "List the presets that plan draft knows.", mixinStandardHelpOptions = true)
     Integer presets() {
-        Preset.all()
+        Drafts.presets()
                 .forEach(preset -> spec.commandLine()
                         .getOut()
                         .print(preset.name()

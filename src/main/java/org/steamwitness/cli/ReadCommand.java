@@ -6,13 +6,10 @@ import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.steamwitness.finding.Finding;
-import org.steamwitness.plan.AsWritten;
-import org.steamwitness.plan.Plan;
 import org.steamwitness.quantity.Progress;
-import org.steamwitness.run.Drafts;
+import org.steamwitness.run.NamedBytes;
 import org.steamwitness.run.ReadLog;
 import org.steamwitness.run.RunFiles;
-import org.steamwitness.trace.Told;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
@@ -55,15 +52,7 @@ final class ReadCommand implements Callable<Integer> {
     private ExitCode one(RunFiles files) {
         Voice voice = new Voice(spec.commandLine());
         try {
-            Told told = Told.NOTHING;
-            if (plan.isPresent()) {
-                AsWritten<Plan> read = Drafts.readPlan(files.plan());
-                if (read.value().isEmpty()) {
-                    read.problems().forEach(voice::tell);
-                    return ExitCode.NOT_EVALUATED;
-                }
-                told = read.value().get().reading();
-            }
+            Optional<NamedBytes> told = plan.isPresent() ? Optional.of(files.plan()) : Optional.empty();
             return shown(new ReadLog(files.log(), told, progress).outcome(), files, voice);
         } catch (RunFiles.MissingFileException missing) {
             voice.trouble(missing.getMessage());

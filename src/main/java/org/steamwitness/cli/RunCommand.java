@@ -4,8 +4,6 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.steamwitness.plan.AsWritten;
-import org.steamwitness.plan.Plan;
 import org.steamwitness.run.Drafts;
 import org.steamwitness.run.RunFiles;
 import picocli.CommandLine.Command;
@@ -47,14 +45,14 @@ final class RunCommand implements Callable<Integer> {
         Voice voice = new Voice(spec.commandLine());
         RunFiles files = new RunFiles(log, plan, out);
         try {
-            AsWritten<Plan> read = Drafts.readPlan(files.plan());
-            if (read.value().isEmpty()) {
-                read.problems().forEach(voice::name);
+            Drafts.Sheet sheet = Drafts.runSheet(files.plan());
+            if (sheet.text().isEmpty()) {
+                sheet.problems().forEach(voice::name);
                 return ExitCode.NOT_EVALUATED.code();
             }
             return Written.of(
                             spec.commandLine(),
-                            Drafts.runSheet(read.value().get()),
+                            sheet.text().get(),
                             Optional.of(files.sheetPath()),
                             replace,
                             "steamwitness run check ")

@@ -3,17 +3,10 @@ package org.steamwitness.cli;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
-import org.steamwitness.intake.FoundColumn;
-import org.steamwitness.intake.Guess;
-import org.steamwitness.quantity.Datum;
 import org.steamwitness.quantity.Printed;
 import org.steamwitness.run.LogSurvey;
 import org.steamwitness.run.LogSurvey.ColumnSurvey;
 import org.steamwitness.run.LogSurvey.Figures;
-import org.steamwitness.trace.Place;
-import org.steamwitness.trace.QuantityKind;
-import org.steamwitness.trace.Reading.RefusedRows;
-import org.steamwitness.trace.Trace;
 
 /** How a log was understood, as lines of text. */
 final class SurveyPage {
@@ -33,31 +26,22 @@ final class SurveyPage {
     }
 
     private List<String> page(String name) {
-        Trace trace = survey.trace();
+        LogSurvey.Extent extent = survey.extent();
         lines.add("Log          " + name);
-        lines.add("Rows         " + trace.size() + ", from line " + trace.lineOf(0) + " to line "
-                + trace.lineOf(trace.size() - 1));
-        lines.add("Time         " + instant(0) + " to " + instant(trace.lastSeconds()) + ", every "
-                + Printed.fixed(trace.interval().medianSeconds(), 2) + " s, longest "
-                + Printed.fixed(trace.interval().longestSeconds(), 2) + " s");
+        lines.add("Rows         " + extent.rows() + ", from line " + extent.firstLine() + " to line "
+                + extent.lastLine());
+        lines.add("Time         " + extent.start() + " to " + extent.end() + ", every "
+                + Printed.fixed(extent.medianSeconds(), 2) + " s, longest "
+                + Printed.fixed(extent.longestSeconds(), 2) + " s");
         lines.add("");
-        for (Guess guess : survey.guesses()) {
-            lines.add(padded(guess.what(), 13) + guess.value() + " ("
-                    + guess.basis().word() + ": " + guess.evidence() + ")");
+        for (LogSurvey.Point point : survey.points()) {
+            lines.add(padded(point.what(), 13) + point.value() + " (" + point.basis() + ": " + point.evidence() + ")");
         }
         lines.add("");
         columns();
         refused();
         findings();
         return lines;
-    }
-
-    private String instant(double seconds) {
-        return survey.trace()
-                .clock()
-                .localAt(seconds)
-                .map(l -> l.replace('T', ' '))
-                .orElseGet(() -> Printed.duration(seconds) + " since the start");
     }
 
     private void columns() {
@@ -71,40 +55,25 @@ final class SurveyPage {
                 + right("step", 9)
                 + right("noise", 9));
         for (ColumnSurvey column : survey.columns()) {
-            FoundColumn found = column.found();
-            String start = padded("#" + found.position(), 4) + padded(cut(found.header()), NAME_WIDTH);
+            String start = padded("#" + column.position(), 4) + padded(cut(column.header()), NAME_WIDTH);
             lines.add(
                     column.figures().isEmpty()
                             ? start + column.why()
                             : start
-                                    + padded(
-                                            found.quantity()
-                                                    .map(QuantityKind::word)
-                                                    .orElse("?"),
-                                            13)
+                                    + padded(column.quantity(), 13)
                                     + padded(unit(column), 14)
-                                    + padded(found.place().map(Place::word).orElse("?"), 11)
-                                    + figures(column.figures().get()));
+                                    + padded(column.place(), 11)
+                                    + figures(column.figures().get(0)));
         }
-        boolean byStart = survey.columns().stream().anyMatch(c -> c.datumBasis().equals("by where it starts"));
-        if (byStart) {
-            lines.add("             * counted from so, by where the pressure starts; check it");
+        if (survey.columns().stream().anyMatch(ColumnSurvey::datumByStart)) {
+            lines.add("    * counted from so, by where the pressure starts: check it");
         }
-        lines.add(
-                "             ? is for you to say in a plan; quantities, units and places here are by the headers' words");
+        lines.add("    ? is for you to say in a plan; quantities, units and places here are by the headers' words");
     }
 
     private static String unit(ColumnSurvey column) {
-        String unit = column.found().unit().orElse("?");
-        boolean pressure = column.found()
-                .quantity()
-                .filter(q -> q == QuantityKind.PRESSURE)
-                .isPresent();
-        if (!pressure) {
-            return unit;
-        }
-        return unit + " " + column.datum().map(Datum::word).orElse("?")
-                + (column.datumBasis().equals("by where it starts") ? "*" : "");
+        return column.unit()
+                + (column.datum().isEmpty() ? "" : " " + column.datum() + (column.datumByStart() ? "*" : ""));
     }
 
     private static String figures(Figures figures) {
@@ -120,11 +89,11 @@ final class SurveyPage {
     }
 
     private void refused() {
-        List<RefusedRows> ranges = survey.reading().refused();
+        List<LogSurvey.Refusal> ranges = survey.refusals();
+        int rows = ranges.stream().mapToInt(LogSurvey.Refusal::rows).sum();
         lines.add("");
-        lines.add("Refused      "
-                + (ranges.isEmpty() ? "nothing" : survey.reading().refusedRows() + " rows or fields"));
-        for (RefusedRows range : ranges.subList(0, Math.min(MOST_LISTED, ranges.size()))) {
+        lines.add("Refused      " + (ranges.isEmpty() ? "nothing" : rows + " rows or fields"));
+        for (LogSurvey.Refusal range : ranges.subList(0, Math.min(MOST_LISTED, ranges.size()))) {
             String where = range.fromLine() == range.toLine()
                     ? "line " + range.fromLine()
                     : "lines " + range.fromLine() + " to " + range.toLine();

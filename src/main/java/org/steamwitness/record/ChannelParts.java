@@ -42,8 +42,8 @@ final class ChannelParts {
                 planned.contact().word(),
                 planned.rule().unit(),
                 planned.rule().datum().word(),
-                measure.map(ChannelMeasure::samples).orElse(0),
-                measure.map(ChannelMeasure::missing).orElse(0),
+                measure.map(ChannelMeasure::samples).orElseGet(() -> counted(planned, false)),
+                measure.map(ChannelMeasure::missing).orElseGet(() -> counted(planned, true)),
                 Given.numberOr(
                         scaled(measure.map(ChannelMeasure::resolution).orElse(OptionalDouble.empty()), perUnit),
                         "no step was seen often enough"),
@@ -69,6 +69,17 @@ final class ChannelParts {
                 planned.mayStateUncertainty()
                         ? extreme(measure.map(ChannelMeasure::highest), pressure)
                         : Given.withheld(NOT_EVALUATED));
+    }
+
+    /** Samples of a channel that enters no result. */
+    private int counted(PlannedChannel planned, boolean missing) {
+        return evidence.trace().channels().stream()
+                .filter(channel -> channel.rule().channel().equals(planned.name()))
+                .findFirst()
+                .map(channel -> (int) IntStream.range(0, channel.values().size())
+                        .filter(i -> channel.values().missing(i) == missing)
+                        .count())
+                .orElse(0);
     }
 
     private boolean isBound(PlannedChannel planned) {

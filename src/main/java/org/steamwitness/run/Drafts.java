@@ -4,13 +4,12 @@ import java.util.List;
 import java.util.Optional;
 import org.steamwitness.finding.Finding;
 import org.steamwitness.plan.AsWritten;
-import org.steamwitness.plan.FoundColumn;
 import org.steamwitness.plan.Plan;
 import org.steamwitness.plan.PlanDraft;
 import org.steamwitness.plan.Preset;
+import org.steamwitness.plan.PublishedSchema;
 import org.steamwitness.plan.RunSheet;
 import org.steamwitness.plan.RunSheetDraft;
-import org.steamwitness.trace.QuantityKind;
 
 /** Plans and run sheets to start from, and what is still wrong or open in those that people have written. */
 public final class Drafts {
@@ -18,24 +17,37 @@ public final class Drafts {
     private Drafts() {}
 
     /**
+     * The presets that a plan can start from.
+     *
+     * @return one for every process
+     */
+    public static List<PresetName> presets() {
+        return Preset.all().stream()
+                .map(p -> new PresetName(p.name(), p.title()))
+                .toList();
+    }
+
+    /**
      * A plan to start from.
      *
-     * @param preset the kind of cycle
+     * @param preset name of a preset
      * @param survey how the log is understood whose columns it is for; empty leaves the preset's channels open
-     * @return commented YAML
+     * @return commented YAML; empty if no preset is named so
      */
-    public static String plan(Preset preset, Optional<LogSurvey> survey) {
-        return PlanDraft.of(preset, survey.map(Drafts::columns).orElse(List.of()));
+    public static Optional<String> plan(String preset, Optional<LogSurvey> survey) {
+        return Preset.named(preset)
+                .map(p -> PlanDraft.of(p, survey.map(LogSurvey::forPlan).orElse(List.of())));
     }
 
     /**
      * A blank run sheet.
      *
      * @param plan the plan that the run follows
-     * @return commented YAML
+     * @return commented YAML, or all that is wrong with the plan
      */
-    public static String runSheet(Plan plan) {
-        return RunSheetDraft.of(plan);
+    public static Sheet runSheet(NamedBytes plan) {
+        AsWritten<Plan> read = Plan.read(plan.name(), plan.bytes());
+        return new Sheet(read.value().map(RunSheetDraft::of), read.problems());
     }
 
     /**
@@ -59,29 +71,28 @@ public final class Drafts {
     }
 
     /**
-     * Reads a plan.
+     * The published shape of plans or run sheets.
      *
-     * @param file the plan
-     * @return it, or all that is wrong with it
+     * @param runSheet whether that of run sheets is wanted
+     * @return a JSON Schema
      */
-    public static AsWritten<Plan> readPlan(NamedBytes file) {
-        return Plan.read(file.name(), file.bytes());
+    public static String schema(boolean runSheet) {
+        return runSheet ? PublishedSchema.ofRunSheet() : PublishedSchema.ofPlan();
     }
 
-    private static List<FoundColumn> columns(LogSurvey survey) {
-        return survey.columns().stream()
-                .filter(c -> c.figures().isPresent())
-                .filter(c ->
-                        c.found().quantity().isPresent() || c.found().unit().isPresent())
-                .map(c -> new FoundColumn(
-                        c.found().header(),
-                        c.found().quantity(),
-                        c.found().unit(),
-                        c.found()
-                                .quantity()
-                                .filter(q -> q == QuantityKind.PRESSURE)
-                                .flatMap(q -> c.datum()),
-                        c.found().place()))
-                .toList();
-    }
+    /**
+     * A preset.
+     *
+     * @param name the word of its process
+     * @param title what it is for
+     */
+    public record PresetName(String name, String title) {}
+
+    /**
+     * A drafted run sheet.
+     *
+     * @param text commented YAML; empty if the plan can't be used
+     * @param problems what is wrong with the plan
+     */
+    public record Sheet(Optional<String> text, List<Finding> problems) {}
 }

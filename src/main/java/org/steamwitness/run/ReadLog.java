@@ -8,8 +8,11 @@ import org.steamwitness.finding.Finding;
 import org.steamwitness.intake.FoundColumn;
 import org.steamwitness.intake.Intake;
 import org.steamwitness.intake.LogReader;
+import org.steamwitness.plan.AsWritten;
+import org.steamwitness.plan.Plan;
 import org.steamwitness.quantity.Datum;
 import org.steamwitness.quantity.PressureUnit;
+import org.steamwitness.quantity.Printed;
 import org.steamwitness.quantity.Progress;
 import org.steamwitness.quantity.TemperatureUnit;
 import org.steamwitness.run.LogSurvey.ColumnSurvey;
@@ -17,10 +20,12 @@ import org.steamwitness.run.LogSurvey.Figures;
 import org.steamwitness.trace.Channel;
 import org.steamwitness.trace.Column;
 import org.steamwitness.trace.Noise;
+import org.steamwitness.trace.Place;
 import org.steamwitness.trace.QuantityKind;
 import org.steamwitness.trace.ReadingRules;
 import org.steamwitness.trace.Resolution;
 import org.steamwitness.trace.Told;
+import org.steamwitness.trace.Trace;
 
 /** Reads a log to show how it is understood: the first step with a log that is new to the program. */
 public final class ReadLog {
@@ -34,19 +39,19 @@ public final class ReadLog {
     private static final double HIGHEST_ATMOSPHERE_PASCAL = 107e3;
 
     private final NamedBytes log;
-    private final Told told;
+    private final Optional<NamedBytes> plan;
     private final Progress progress;
 
     /**
      * Prepares the reading.
      *
      * @param log the logger file
-     * @param told what need not be found
+     * @param plan a plan whose part {@code reading} says what need not be found
      * @param progress is told of the advance
      */
-    public ReadLog(NamedBytes log, Told told, Progress progress) {
+    public ReadLog(NamedBytes log, Optional<NamedBytes> plan, Progress progress) {
         this.log = log;
-        this.told = told;
+        this.plan = plan;
         this.progress = progress;
     }
 
@@ -77,6 +82,14 @@ public final class ReadLog {
      * @return how it was understood, or why not
      */
     public Outcome outcome() {
+        Told told = Told.NOTHING;
+        if (plan.isPresent()) {
+            AsWritten<Plan> read = Plan.read(plan.get().name(), plan.get().bytes());
+            if (read.value().isEmpty()) {
+                return new Outcome.Refused(read.problems());
+            }
+            told = read.value().get().reading();
+        }
         ReadingRules rules = new ReadingRules(List.of(), told);
         Intake intake = new LogReader(log.name(), rules, Optional.empty(), progress).survey(log.bytes());
         if (intake instanceof Intake.Unreadable unreadable) {
@@ -90,36 +103,71 @@ public final class ReadLog {
 
     private static LogSurvey survey(Intake.Read read) {
         List<ColumnSurvey> columns = new ArrayList<>();
+        List<org.steamwitness.plan.FoundColumn> forPlan = new ArrayList<>();
         for (FoundColumn column : read.columns()) {
             Optional<Channel> channel = read.trace().channels().stream()
                     .filter(c -> c.rule().header().equals("#" + column.position()))
                     .findFirst();
-            columns.add(channel.map(c -> ofChannel(read, column, c)).orElseGet(() -> withoutSamples(read, column)));
+            Optional<Datum> datum = channel.flatMap(c -> datum(column, c));
+            columns.add(column(read, column, channel, datum));
+            if (channel.isPresent()
+                    && (column.quantity().isPresent() || column.unit().isPresent())) {
+                forPlan.add(new org.steamwitness.plan.FoundColumn(
+                        column.header(), column.quantity(), column.unit(), datum, column.place()));
+            }
         }
-        return new LogSurvey(read.trace(), read.reading(), read.guesses(), List.copyOf(columns), read.findings());
+        return new LogSurvey(
+                extent(read.trace()),
+                read.guesses().stream()
+                        .map(g -> new LogSurvey.Point(
+                                g.what(), g.value(), g.basis().word(), g.evidence()))
+                        .toList(),
+                columns,
+                read.reading().refused().stream()
+                        .map(r -> new LogSurvey.Refusal(r.fromLine(), r.toLine(), r.rows(), r.column(), r.reason()))
+                        .toList(),
+                read.findings(),
+                forPlan);
     }
 
-    private static ColumnSurvey withoutSamples(Intake.Read read, FoundColumn column) {
+    private static LogSurvey.Extent extent(Trace trace) {
+        return new LogSurvey.Extent(
+                trace.size(),
+                trace.lineOf(0),
+                trace.lineOf(trace.size() - 1),
+                instant(trace, 0),
+                instant(trace, trace.lastSeconds()),
+                trace.interval().medianSeconds(),
+                trace.interval().longestSeconds());
+    }
+
+    private static String instant(Trace trace, double seconds) {
+        return trace.clock()
+                .localAt(seconds)
+                .map(l -> l.replace('T', ' '))
+                .orElseGet(() -> Printed.duration(seconds) + " since the start");
+    }
+
+    private static ColumnSurvey column(
+            Intake.Read read, FoundColumn column, Optional<Channel> channel, Optional<Datum> datum) {
         boolean time = read.times().contains(column.position() - 1);
+        boolean pressure =
+                column.quantity().filter(q -> q == QuantityKind.PRESSURE).isPresent();
         return new ColumnSurvey(
-                column,
-                column.datum(),
-                "",
-                Optional.empty(),
-                time ? "tells the time" : "not read: no column of numbers");
+                column.position(),
+                column.header(),
+                column.quantity().map(QuantityKind::word).orElse("?"),
+                column.unit().orElse("?"),
+                pressure ? datum.map(Datum::word).orElse("?") : "",
+                column.datum().isEmpty() && datum.isPresent(),
+                column.place().map(Place::word).orElse("?"),
+                channel.map(c -> List.of(figures(read.trace().seconds(), c))).orElse(List.of()),
+                channel.isPresent() ? "" : time ? "tells the time" : "not read: no column of numbers");
     }
 
-    private static ColumnSurvey ofChannel(Intake.Read read, FoundColumn column, Channel channel) {
-        Optional<Datum> datum = column.datum();
-        String basis = datum.isPresent() ? "by its header" : "";
-        boolean pressure = channel.rule().kind() == QuantityKind.PRESSURE
-                && !channel.rule().unit().isEmpty();
-        if (pressure && datum.isEmpty()) {
-            datum = byStart(channel.values());
-            basis = datum.isPresent() ? "by where it starts" : "";
-        }
-        return new ColumnSurvey(
-                column, datum, basis, Optional.of(figures(read.trace().seconds(), channel)), "");
+    private static Optional<Datum> datum(FoundColumn column, Channel channel) {
+        boolean pressure = channel.rule().kind() == QuantityKind.PRESSURE;
+        return column.datum().isPresent() || !pressure ? column.datum() : byStart(channel.values());
     }
 
     private static Optional<Datum> byStart(Column pascal) {

@@ -167,7 +167,6 @@ class PlanLanguageTest {
                         "saturation.judged: heating, hold",
                         "marks-decide: no",
                         "mark-agreement",
-                        "log-part 08:05 to 10:10",
                         "correction: start of hold moved to 08:28",
                         "correction: channel can-1 left out");
     }

@@ -223,12 +223,11 @@ class PlanSchemaTest {
             date: 2026-02-20      | date: 2026-13-20
             encoding: windows-1252 | encoding: EBCDIC
             delimiter: semicolon  | delimiter: ;
-            delimiter: semicolon  | delimiter: comma
             decimal-mark: comma   | decimal-mark: dot
-            thousands-mark: none  | thousands-mark: comma
-            header-line: 4        | header-line: 0
+            thousands-mark: space | thousands-mark: dots
+            header-line: 4        | header-line: -1
             '[Date, Time]'        | '[Date, Time, Zone]'
-            dd.MM.yyyy            | DD.MM.YYYY
+            day-month-year        | dd.MM.yyyy
             quoted-line-breaks: no | quoted-line-breaks: never
             largest-refused-share: 1 % | largest-refused-share: many
             what: spread          | what: taste
