@@ -2,8 +2,10 @@ package org.steamwitness.cli;
 
 import java.io.PrintWriter;
 import java.nio.file.Path;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import org.steamwitness.quantity.Progress;
 import org.steamwitness.run.Evaluate;
@@ -73,6 +75,15 @@ final class EvaluateCommand implements Callable<Integer> {
     public Integer call() {
         if (sheet.isPresent() && logs.size() > 1) {
             throw new ParameterException(spec.commandLine(), "--run names one run sheet, but there are several logs");
+        }
+        Set<String> names = new HashSet<>();
+        for (Path log : logs) {
+            if (!names.add(new RunFiles(log, plan, sheet).name())) {
+                throw new ParameterException(
+                        spec.commandLine(),
+                        "two logs would give the same record: " + log + " and another of its name; evaluate them into"
+                                + " different folders with --out");
+            }
         }
         ExitCode worst = ExitCode.MET;
         for (Path log : logs) {

@@ -20,7 +20,13 @@ public final class Main {
     public static void main(String[] arguments) {
         System.setProperty("java.awt.headless", "true");
         System.setProperty("org.apache.commons.logging.Log", "org.apache.commons.logging.impl.NoOpLog");
-        int code = new Shell(utf8(FileDescriptor.out), utf8(FileDescriptor.err), Progress.UNWATCHED).run(arguments);
+        PrintWriter out = utf8(FileDescriptor.out);
+        PrintWriter err = utf8(FileDescriptor.err);
+        int code = new Shell(out, err, Progress.UNWATCHED).run(arguments);
+        if (out.checkError()) {
+            err.println("What was to be told could not be written to the standard output.");
+            code = ExitCode.NOT_WRITTEN.code();
+        }
         System.exit(code);
     }
 

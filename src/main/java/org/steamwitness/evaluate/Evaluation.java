@@ -60,7 +60,8 @@ public record Evaluation(
         List<Criterion> criteria = Criteria.of(plan, phases, hold, saturation, lethality);
         List<Finding> findings = new ArrayList<>(known);
         findings.addAll(instruments.findings());
-        findings.addAll(RunFindings.of(trace, reading, phases, hold, saturation));
+        findings.addAll(
+                RunFindings.of(trace, reading, plan, new RunFindings.Evaluated(phases, hold, saturation, lethality)));
         Verdict verdict = Verdict.of(criteria, findings, plan.draft());
         return new Evaluation(
                 instruments, phases, saturation, hold, lethality, criteria, verdict, List.copyOf(findings));

@@ -138,6 +138,28 @@ public enum FindingKind {
             Severity.BLOCKS,
             "The log ends in the hold phase.",
             "The end of the hold is not in the log; look for the rest of the log."),
+    /** More than one attempt at the hold. */
+    HOLD_IN_ATTEMPTS(
+            Severity.REVIEW,
+            "The band was held in {count} attempts; the longest, from {from} to {to}, is judged, saturation in the others"
+                    + " is not.",
+            "See the attempts in the record; a person has to judge why the hold was interrupted."),
+    /** A probe without samples. */
+    PROBE_WITHOUT_SAMPLES(
+            Severity.REVIEW,
+            "{channel} has no samples for {duration} in all; its lethality counts nothing for that time.",
+            "Look for a loose or broken probe; the lethality it reached may be larger than what is told."),
+    /** A departure from saturation too short for an episode. */
+    DEPARTURE_SHORT(
+            Severity.REVIEW,
+            "{channel} left saturation in the hold phase for {samples} samples, too short for an episode; at worst {worst}"
+                    + " K at {at}.",
+            "Look at these samples; a sensor's fault and a short dip look alike."),
+    /** A mark and the log that do not agree. */
+    MARK_DIFFERS(
+            Severity.REVIEW,
+            "The entered mark {mark} at {time} does not agree with the log: {what}.",
+            "Check the entry and the clocks; the mark was used as it was entered."),
     /** A mark of the run sheet lies outside the log. */
     MARK_OUTSIDE_LOG(
             Severity.REVIEW,

@@ -20,9 +20,11 @@ import org.steamwitness.trace.QuantityKind;
  */
 record HeaderText(String raw, String name, Optional<UnitText> unit) {
 
-    /** A unit in brackets, behind a stroke, or as the last word. */
-    private static final Pattern WITH_UNIT =
-            Pattern.compile("(.*?)\\s*(?:[\\[(]([^\\[\\]]+?)[\\])]|(?:\\s/\\s*|,\\s*)(\\S.*)|[ _](\\S+))\\s*");
+    /** A unit in brackets at the end. */
+    private static final Pattern BRACKETED = Pattern.compile("(.*?)\\s*[\\[(]([^\\[\\]]+?)[\\])]\\s*");
+
+    /** What may stand between a name and its unit. */
+    private static final Pattern PARTING = Pattern.compile("\\s+in\\s+|\\s*/\\s*|\\s*,\\s*|[\\s_]+");
 
     private static final Map<Place, List<String>> PLACES = Map.ofEntries(
             Map.entry(Place.DRAIN, List.of("drain")),
@@ -43,14 +45,18 @@ record HeaderText(String raw, String name, Optional<UnitText> unit) {
         if (below.isPresent()) {
             return new HeaderText(raw, text, below);
         }
-        Matcher matcher = WITH_UNIT.matcher(text);
-        if (matcher.matches()) {
-            for (int group = 2; group <= 4; group++) {
-                Optional<UnitText> unit =
-                        Optional.ofNullable(matcher.group(group)).flatMap(UnitText::of);
-                if (unit.isPresent() && !matcher.group(1).isBlank()) {
-                    return new HeaderText(raw, matcher.group(1).strip(), unit);
-                }
+        Matcher bracketed = BRACKETED.matcher(text);
+        if (bracketed.matches()) {
+            Optional<UnitText> unit = UnitText.of(bracketed.group(2));
+            if (unit.isPresent() && !bracketed.group(1).isBlank()) {
+                return new HeaderText(raw, bracketed.group(1).strip(), unit);
+            }
+        }
+        Matcher parting = PARTING.matcher(text);
+        while (parting.find()) {
+            Optional<UnitText> unit = UnitText.of(text.substring(parting.end()));
+            if (unit.isPresent() && parting.start() > 0) {
+                return new HeaderText(raw, text.substring(0, parting.start()).strip(), unit);
             }
         }
         return new HeaderText(raw, text, Optional.empty());

@@ -71,8 +71,7 @@ public final class RecordFolder {
     }
 
     private Path temporary(byte[] bytes) throws IOException {
-        Path file = Files.createTempFile(folder, ".record-", ".part");
-        file.toFile().deleteOnExit();
+        Path file = Parts.in(folder);
         return Files.write(file, bytes);
     }
 

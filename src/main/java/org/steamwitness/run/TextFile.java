@@ -36,8 +36,7 @@ public final class TextFile {
         }
         try {
             Path folder = path.toAbsolutePath().getParent();
-            Path part = Files.createTempFile(folder, ".draft-", ".part");
-            part.toFile().deleteOnExit();
+            Path part = Parts.in(folder);
             Files.write(part, text.getBytes(StandardCharsets.UTF_8));
             Files.move(part, path, StandardCopyOption.REPLACE_EXISTING, StandardCopyOption.ATOMIC_MOVE);
         } catch (IOException wrong) {

@@ -16,7 +16,8 @@ final class HoldingTime {
     static Criterion of(BoundPlan plan, HoldResult hold) {
         double limit = plan.hold().durationSeconds();
         double possible = plan.decision().guarded() ? hold.possibleSeconds() : hold.provenSeconds();
-        Decision decision = GuardBand.atLeast(hold.provenSeconds(), possible, limit);
+        Decision held = GuardBand.atLeast(hold.provenSeconds(), possible, limit);
+        Decision decision = held == Decision.NOT_MET && hold.cutByLog() ? Decision.UNDECIDED : held;
         return new Criterion(
                 "holding-time",
                 Criterion.Subject.TIME_OR_TEMPERATURE,
@@ -39,6 +40,9 @@ final class HoldingTime {
             return "0 s" + required + ", the band was never held";
         }
         String proven = Printed.duration(hold.provenSeconds()) + required + " proven";
+        if (decision == Decision.UNDECIDED && hold.cutByLog()) {
+            return proven + "; a gap or the end of the log leaves open whether it was held longer";
+        }
         return decision == Decision.UNDECIDED
                 ? proven + ", " + Printed.duration(hold.possibleSeconds())
                         + " possible: the sampling interval leaves it open"

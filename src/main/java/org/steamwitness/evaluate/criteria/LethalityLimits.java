@@ -40,12 +40,21 @@ final class LethalityLimits {
 
     private Criterion least(double limitSeconds) {
         Optional<ProbeLethality> probe = lethality.governing();
-        Optional<Decision> decision = probe.map(p -> GuardBand.atLeast(
-                p.surelySeconds()
-                        - p.marked().map(MarkedLethality::lethalitySeconds).orElse(0.0),
-                p.surelyNotSeconds(),
-                limitSeconds));
+        Optional<Decision> decision = probe.map(p -> unlessLost(
+                p,
+                GuardBand.atLeast(
+                        p.surelySeconds()
+                                - p.marked()
+                                        .map(MarkedLethality::lethalitySeconds)
+                                        .orElse(0.0),
+                        p.surelyNotSeconds(),
+                        limitSeconds)));
         return criterion("lethality-" + aim.name(), "least", probe, limitSeconds, true, decision);
+    }
+
+    /** Time without samples counts as nothing, so that a lethality that falls short only for it is not known to. */
+    private static Decision unlessLost(ProbeLethality probe, Decision decision) {
+        return decision == Decision.NOT_MET && probe.coverage().lostSeconds() > 0 ? Decision.UNDECIDED : decision;
     }
 
     private Criterion most(double limitSeconds) {
@@ -111,8 +120,10 @@ final class LethalityLimits {
                 aim.probes().equals(ProbeChoice.PRODUCT) || !probe.channel().inSteam()
                         ? ""
                         : "; in the chamber's steam, not in a product";
+        double lost = probe.coverage().lostSeconds();
         return reached
                 + where
+                + (lost > 0 ? "; without samples for " + Printed.duration(lost) + ", which count as nothing" : "")
                 + probe.marked()
                         .filter(m -> m.lethalitySeconds() > 0)
                         .map(m -> "; of it " + printed(m.lethalitySeconds()) + symbol

@@ -41,8 +41,13 @@ final class SaturationAgreement {
         List<Side> sides = new ArrayList<>();
         for (PhaseDeparture probe : phases.hold().map(check::in).orElse(List.of())) {
             PhaseDeparture.Figures figures = probe.figures().orElseThrow();
-            sides.add(new Side(probe.channel().name(), figures.lowest(), -tolerance.airKelvin()));
-            sides.add(new Side(probe.channel().name(), figures.highest(), tolerance.superheatKelvin()));
+            boolean quiet = check.episodes().stream().noneMatch(e -> e.channel().equals(probe.channel()));
+            sides.add(new Side(
+                    probe.channel().name(), quiet ? figures.lowestInside() : figures.lowest(), -tolerance.airKelvin()));
+            sides.add(new Side(
+                    probe.channel().name(),
+                    quiet ? figures.highestInside() : figures.highest(),
+                    tolerance.superheatKelvin()));
         }
         return sides.stream()
                 .max(Comparator.comparingDouble(Side::share))

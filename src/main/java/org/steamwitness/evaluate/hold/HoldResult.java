@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.steamwitness.evaluate.instruments.Instruments;
 import org.steamwitness.evaluate.phase.HoldAttempt;
+import org.steamwitness.evaluate.phase.HoldAttempt.EndedBy;
 import org.steamwitness.evaluate.phase.Phase;
 import org.steamwitness.evaluate.phase.Phases;
 import org.steamwitness.plan.BoundChannel;
@@ -17,6 +18,7 @@ import org.steamwitness.trace.Trace;
  *
  * @param provenSeconds from the first to the last sample inside the band; zero if it was never held
  * @param possibleSeconds from the sample before to the sample after; the truth lies between both
+ * @param cutByLog whether a gap or the end of the log leaves open how long it was really held
  * @param probes what each temperature channel showed, in the order of the plan
  * @param spread greatest difference between steam-contact probes at one instant; empty with fewer than two of them
  * @param missingSamples samples of the starting channels that are missing in the hold phase
@@ -24,6 +26,7 @@ import org.steamwitness.trace.Trace;
 public record HoldResult(
         double provenSeconds,
         double possibleSeconds,
+        boolean cutByLog,
         List<ProbeInHold> probes,
         Optional<Spread> spread,
         List<MissingSamples> missingSamples) {
@@ -40,7 +43,7 @@ public record HoldResult(
     public static HoldResult of(Trace trace, BoundPlan plan, Instruments instruments, Phases phases) {
         Optional<HoldAttempt> judged = phases.judged();
         if (judged.isEmpty()) {
-            return new HoldResult(0, 0, List.of(), Optional.empty(), List.of());
+            return new HoldResult(0, 0, false, List.of(), Optional.empty(), List.of());
         }
         HoldAttempt attempt = judged.get();
         Phase hold = phases.hold().orElseThrow();
@@ -51,6 +54,7 @@ public record HoldResult(
         return new HoldResult(
                 trace.seconds().at(attempt.to()) - trace.seconds().at(attempt.from()),
                 attempt.latestEndSeconds() - attempt.earliestStartSeconds(),
+                phases.attempts().stream().anyMatch(a -> a.endedBy() == EndedBy.GAP || a.endedBy() == EndedBy.LOG_END),
                 probes,
                 Spread.greatest(plan.inSteam().stream().map(instruments::of).toList(), hold),
                 missing(plan, hold));

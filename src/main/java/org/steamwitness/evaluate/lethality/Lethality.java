@@ -35,7 +35,12 @@ public record Lethality(LethalityAim aim, List<ProbeLethality> probes) {
             Phases phases,
             Function<BoundChannel, Optional<List<Stretch>>> outside,
             double z) {
-        ProbeLethality.Scope scope = new ProbeLethality.Scope(phases.phases(), plan.longestGapSeconds(), z, outside);
+        ProbeLethality.Scope scope = new ProbeLethality.Scope(
+                phases.phases(),
+                ProbeLethality.Scope.steamOffIndex(trace, plan, phases.phases()),
+                plan.longestGapSeconds(),
+                z,
+                outside);
         return plan.lethality().stream()
                 .map(aim -> new Lethality(
                         aim,

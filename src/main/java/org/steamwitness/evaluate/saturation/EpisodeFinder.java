@@ -9,8 +9,8 @@ import org.steamwitness.trace.Trace;
 
 /**
  * Joins the samples of one probe that left saturation to the same side. Samples closer together than the shortest time
- * belong together; what lasts less than the shortest time is no episode. An episode is confirmed if it is one already
- * by its confirmed samples alone.
+ * belong together. What may have lasted longer than the shortest time, from the sample before to the sample after, is an
+ * episode; it is confirmed if its confirmed samples alone, from first to last, lasted that long.
  */
 final class EpisodeFinder {
 
@@ -35,8 +35,12 @@ final class EpisodeFinder {
     }
 
     private List<Episode> ofKind(Episode.Kind kind, SampleState sure, SampleState unsure, int from, int end) {
-        List<Stretch> confirmed = stretches(i -> states.at(i) == sure, from, end);
-        List<Stretch> outside = stretches(i -> states.at(i) == sure || states.at(i) == unsure, from, end);
+        List<Stretch> confirmed = stretches(i -> states.at(i) == sure, from, end).stream()
+                .filter(s -> seconds(s.to()) - seconds(s.from()) >= tolerance.shortestSeconds())
+                .toList();
+        List<Stretch> outside = stretches(i -> states.at(i) == sure || states.at(i) == unsure, from, end).stream()
+                .filter(this::maySuffice)
+                .toList();
         List<Episode> episodes = new ArrayList<>();
         for (Stretch stretch : outside) {
             boolean holdsConfirmed =
@@ -46,6 +50,14 @@ final class EpisodeFinder {
         return episodes;
     }
 
+    /** Between its samples a departure may have lasted from the sample before to the sample after. */
+    private boolean maySuffice(Stretch stretch) {
+        double before = seconds(Math.max(0, stretch.from() - 1));
+        double after = seconds(Math.min(trace.size() - 1, stretch.to() + 1));
+        return seconds(stretch.to()) - seconds(stretch.from()) >= tolerance.shortestSeconds()
+                || after - before > tolerance.shortestSeconds();
+    }
+
     private List<Stretch> stretches(IntPredicate belongs, int from, int end) {
         List<Stretch> found = new ArrayList<>();
         int first = -1;
@@ -53,9 +65,7 @@ final class EpisodeFinder {
         for (int i = from; i <= end; i++) {
             boolean closes = first >= 0 && (i == end || seconds(i) - seconds(last) > tolerance.shortestSeconds());
             if (closes) {
-                if (seconds(last) - seconds(first) >= tolerance.shortestSeconds()) {
-                    found.add(new Stretch(first, last));
-                }
+                found.add(new Stretch(first, last));
                 first = -1;
             }
             if (i < end && belongs.test(i)) {

@@ -29,6 +29,8 @@ public record PhaseDeparture(
         int judged = 0;
         int lowest = -1;
         int highest = -1;
+        int lowestInside = -1;
+        int highestInside = -1;
         double sum = 0;
         double squares = 0;
         double air = 0;
@@ -49,6 +51,10 @@ public record PhaseDeparture(
             squares += kelvin * kelvin;
             lowest = lowest < 0 || kelvin < departure.kelvinAt(lowest) ? i : lowest;
             highest = highest < 0 || kelvin > departure.kelvinAt(highest) ? i : highest;
+            if (!states.at(i).outside()) {
+                lowestInside = lowestInside < 0 || kelvin < departure.kelvinAt(lowestInside) ? i : lowestInside;
+                highestInside = highestInside < 0 || kelvin > departure.kelvinAt(highestInside) ? i : highestInside;
+            }
             double fraction = departure.airFractionAt(i);
             air += fraction;
             airHighest = Math.max(airHighest, fraction);
@@ -61,6 +67,8 @@ public record PhaseDeparture(
                 : Optional.of(new Figures(
                         extreme(departure, lowest),
                         extreme(departure, highest),
+                        extreme(departure, lowestInside < 0 ? lowest : lowestInside),
+                        extreme(departure, highestInside < 0 ? highest : highestInside),
                         sum / judged,
                         Math.sqrt(squares / judged),
                         air / judged,
@@ -87,6 +95,8 @@ public record PhaseDeparture(
      *
      * @param lowest least departure, the first if there are several
      * @param highest greatest departure
+     * @param lowestInside least departure within the tolerance; the least of all if there is none
+     * @param highestInside greatest departure within the tolerance; the greatest of all if there is none
      * @param meanKelvin mean departure
      * @param rmsKelvin root of the mean square departure
      * @param airFractionMean mean equivalent air fraction
@@ -96,6 +106,8 @@ public record PhaseDeparture(
     public record Figures(
             Extreme lowest,
             Extreme highest,
+            Extreme lowestInside,
+            Extreme highestInside,
             double meanKelvin,
             double rmsKelvin,
             double airFractionMean,

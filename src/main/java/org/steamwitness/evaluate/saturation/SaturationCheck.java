@@ -96,6 +96,21 @@ public record SaturationCheck(
     }
 
     /**
+     * Departure of one sample.
+     *
+     * @param channel a probe that was held against saturation
+     * @param index of the sample
+     * @return kelvin; NaN where there is none
+     */
+    public double kelvinAt(BoundChannel channel, int index) {
+        return departures.stream()
+                .filter(d -> d.channel().equals(channel))
+                .findFirst()
+                .map(d -> d.kelvinAt(index))
+                .orElse(Double.NaN);
+    }
+
+    /**
      * The probe that went longest without a sample that could be judged.
      *
      * @param phase one of the run's phases

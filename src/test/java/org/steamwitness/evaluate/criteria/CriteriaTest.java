@@ -259,6 +259,92 @@ class CriteriaTest {
         assertThat(saturationWith(pressed).decision()).isEqualTo(Decision.MET);
     }
 
+    /** One sample of a dip is no episode: the criterion shows what it judged, and the dip is told beside it. */
+    @Test
+    void neverShowsADepartureBeyondTheLimitBesideMet() {
+        double[] drain = held(30);
+        drain[12] = 116;
+        double[] chamber = held(30);
+        chamber[29] = 60;
+        Evaluation evaluation = evaluate(Bench.every(5, 30)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.1, chamber),
+                        Bench.temperature("drain", Place.DRAIN, 0.1, drain),
+                        Bench.pressure(1, steam(30))));
+        Criterion saturation = evaluation.criteria().get(1);
+        assertThat(saturation.decision()).isEqualTo(Decision.MET);
+        assertThat(saturation.margin().orElseThrow()).isPositive();
+        assertThat(evaluation.findings())
+                .extracting(Finding::text)
+                .singleElement()
+                .asString()
+                .startsWith(
+                        "drain left saturation in the hold phase for 1 samples, too short for an episode; at worst -6.0");
+    }
+
+    /** What a probe without samples lacks can't be called not met. */
+    @Test
+    void lethalityThatFallsShortForLackOfSamplesIsUndecided() {
+        double[] can = new double[61];
+        Arrays.fill(can, 121.11);
+        Arrays.fill(can, 20, 40, Double.NaN);
+        Evaluation evaluation = evaluate(Bench.every(5, 61)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.05, held(61)),
+                        Bench.temperature("can-1", Place.PRODUCT, 0.05, can))
+                .aiming(Bench.aim(121.11, 280, true)));
+        Criterion lethality = evaluation.criteria().get(2);
+        assertThat(lethality.decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(lethality.why()).endsWith("; without samples for 1 min 45 s, which count as nothing");
+        assertThat(evaluation.findings()).extracting(Finding::kind).contains(FindingKind.PROBE_WITHOUT_SAMPLES);
+    }
+
+    @Test
+    void aHoldCutShortByTheEndOfTheLogIsUndecided() {
+        Criterion time = evaluate(Bench.every(5, 20)
+                        .holding(600)
+                        .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20))))
+                .criteria()
+                .get(0);
+        assertThat(time.decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(time.why())
+                .isEqualTo(
+                        "1 min 35 s of 10 min 00 s proven; a gap or the end of the log leaves open whether it was held"
+                                + " longer");
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            0 | 0   | 200 | the band was held for 1 min 35 s longer
+            0 | 0   | 400 | the band was left 1 min 45 s before
+            0 | 120 | 295 | the band was reached 1 min 40 s before
+            """)
+    void marksThatDoNotAgreeWithTheLogAreTold(double steamOn, double ventClosed, double steamOff, String what) {
+        double[] celsius = new double[100];
+        Arrays.fill(celsius, 60);
+        Arrays.fill(celsius, 4, 60, 122);
+        Bench bench = Bench.every(5, 100)
+                .marked(steamOn, ventClosed, steamOff)
+                .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius));
+        assertThat(evaluate(bench).findings())
+                .filteredOn(f -> f.kind() == FindingKind.MARK_DIFFERS)
+                .extracting(f -> f.facts().get("what"))
+                .containsExactly(what);
+        bench.marked(0, 0, 300);
+        assertThat(evaluate(bench).findings()).noneMatch(f -> f.kind() == FindingKind.MARK_DIFFERS);
+    }
+
+    @Test
+    void severalAttemptsAreTold() {
+        double[] celsius = new double[60];
+        Arrays.fill(celsius, 122);
+        celsius[20] = 110;
+        celsius[59] = 60;
+        Evaluation evaluation =
+                evaluate(Bench.every(5, 60).with(Bench.temperature("chamber", Place.REFERENCE, 0.1, celsius)));
+        assertThat(evaluation.findings()).extracting(Finding::kind).contains(FindingKind.HOLD_IN_ATTEMPTS);
+    }
+
     private static Criterion saturationWith(double[] pressed) {
         return evaluate(Bench.every(5, 20)
                         .with(Bench.temperature("chamber", Place.REFERENCE, 0.1, held(20)), Bench.pressure(1, pressed)))

@@ -180,7 +180,7 @@ class LethalityTest {
         assertThat(result(bench).governing().orElseThrow().channel().name()).isEqualTo("can-2");
     }
 
-    /** Steam-off is the end of the hold phase, not of the phase that happens to come first. */
+    /** Without a mark steam-off is the last sample of the hold phase: what came behind it is cooling. */
     @Test
     void countsToSteamOffThroughStandingAndHeating() {
         Bench bench = Bench.every(5, 9)
@@ -190,9 +190,23 @@ class LethalityTest {
                 .marked(5, 10, Double.NaN)
                 .aiming(F0);
         ProbeLethality probe = result(bench).probes().get(0);
-        assertThat(probe.toSteamOffSeconds()).isCloseTo(30, within(1e-9));
+        assertThat(probe.toSteamOffSeconds()).isCloseTo(25, within(1e-9));
         assertThat(probe.withCoolingSeconds()).isCloseTo(40, within(1e-9));
         assertThat(probe.perPhase()).hasSizeGreaterThan(3);
+    }
+
+    /** The mark lies between two samples: the one before it is the last that counts. */
+    @Test
+    void countsToTheSampleBeforeAnEnteredSteamOff() {
+        Bench bench = Bench.every(5, 9)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.1, 20, 100, 122, 122, 122, 122, 122, 60, 60),
+                        flat("can-1", 9))
+                .marked(5, 10, 22)
+                .aiming(F0);
+        assertThat(result(bench).probes().get(0).toSteamOffSeconds()).isCloseTo(20, within(1e-9));
+        bench.marked(5, 10, 25);
+        assertThat(result(bench).probes().get(0).toSteamOffSeconds()).isCloseTo(25, within(1e-9));
     }
 
     private static BoundChannel flat(String name, int samples) {

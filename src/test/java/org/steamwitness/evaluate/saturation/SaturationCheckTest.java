@@ -82,7 +82,7 @@ class SaturationCheckTest {
     @Test
     void joinsWhatLiesCloseTogetherAndForgetsWhatIsShort() {
         double[] celsius = series(122, 40);
-        Arrays.fill(celsius, 5, 7, 120.0);
+        celsius[5] = 120.0;
         celsius[20] = 120.0;
         celsius[21] = 120.0;
         celsius[23] = 120.0;
@@ -90,6 +90,16 @@ class SaturationCheckTest {
         assertThat(episodes).hasSize(1);
         assertThat(episodes.get(0).from()).isEqualTo(20);
         assertThat(episodes.get(0).to()).isEqualTo(23);
+    }
+
+    /** Two samples 5 s apart lasted 5 s at least and 15 s at most: possible, with 10 s as the shortest. */
+    @Test
+    void whatMayHaveLastedLongEnoughIsPossible() {
+        double[] celsius = series(122, 40);
+        Arrays.fill(celsius, 5, 7, 118.0);
+        assertThat(check(celsius, 0.1, 1).episodes())
+                .extracting(Episode::confirmed)
+                .containsExactly(false);
     }
 
     @Test
