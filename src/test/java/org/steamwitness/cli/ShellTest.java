@@ -7,6 +7,7 @@ import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -230,6 +231,97 @@ class ShellTest {
         assertThat(out.toString().lines().count()).isLessThanOrEqualTo(36);
         assertThat(out.toString().lines().mapToInt(String::length).max().orElseThrow())
                 .isLessThanOrEqualTo(160);
+    }
+
+    /** From a log never seen before to a plan and a run sheet whose open places are named. */
+    @Test
+    void leadsFromANewLogToItsPapers() throws IOException {
+        Path fresh = folder.resolve("week 7.csv");
+        Files.write(
+                fresh,
+                Files.readAllLines(log).stream()
+                        .map(row -> row.startsWith("time")
+                                ? "Time;T1 steam [°C];T2 drain [°C];T3 top [°C];P1 bar(g);T5 can in degC;T6 can in degC"
+                                : row.replace('T', ' ').replace(',', ';').replace('.', ','))
+                        .toList());
+        assertThat(run("read", fresh.toString())).isZero();
+        assertThat(out.toString())
+                .contains(
+                        "delimiter    semicolon (found",
+                        "decimal mark comma (found",
+                        "time         year-month-day (found")
+                .contains("#2  T1 steam [°C]", "bar gauge", "Refused      nothing")
+                .containsPattern("#6  T5 can in degC +temperature +degC +product");
+        assertThat(run("plan", "draft", fresh.toString())).isZero();
+        Path drafted = folder.resolve("week 7.plan.yaml");
+        assertThat(drafted).content().contains("column: \"T1 steam [°C]\"", "Open places, marked \"?\":");
+        assertThat(run("plan", "check", drafted.toString())).isEqualTo(3);
+        assertThat(err.toString()).contains("hold.at-least: open place: fill in a temperature such as 121.1 degC");
+        assertThat(run("plan", "draft", fresh.toString())).isEqualTo(74);
+        assertThat(err.toString()).contains("week 7.plan.yaml exists; name another file with --out");
+        assertThat(run("run", "draft", fresh.toString())).isEqualTo(3);
+        assertThat(run("run", "draft", fresh.toString(), "--plan", plan.toString()))
+                .isZero();
+        Path blank = folder.resolve("week 7.run.yaml");
+        assertThat(blank).content().contains("plan-used: {id: \"R2-stew-73x111\", revision: 3}", "steam-on: \"?\"");
+        assertThat(run("run", "check", blank.toString())).isEqualTo(3);
+        assertThat(run("run", "check", sheet.toString())).isZero();
+        assertThat(run("plan", "check", plan.toString())).isZero();
+    }
+
+    @Test
+    void describesPresetsAndShapes() {
+        assertThat(run("plan", "presets")).isZero();
+        assertThat(out.toString()).contains("porous-load  Steam sterilizer, porous load");
+        assertThat(run("plan", "schema")).isZero();
+        assertThat(run("plan", "schema", "--run")).isZero();
+        assertThat(out.toString()).contains("urn:steamwitness:plan:1", "urn:steamwitness:run:1");
+        assertThat(run("plan", "draft", "--process", "oven")).isEqualTo(64);
+        assertThat(run("plan", "draft", "--process", "leak-test")).isZero();
+        assertThat(out.toString()).contains("# Draft from the preset leak-test, approved by nobody.");
+        assertThat(run("plan")).isEqualTo(64);
+        assertThat(run("run")).isEqualTo(64);
+    }
+
+    @Test
+    void readsNoLogThatItCannotUnderstand() throws IOException {
+        Files.writeString(log, "time,T1\n03/04/2026 08:00:00,20\n03/04/2026 08:00:05,21\n");
+        assertThat(run("read", log.toString())).isEqualTo(3);
+        assertThat(err.toString()).contains("Day and month of the log's dates can't be told apart");
+        assertThat(run("read", folder.resolve("none.csv").toString())).isEqualTo(64);
+        assertThat(run("plan", "draft", log.toString(), "--replace")).isEqualTo(3);
+    }
+
+    /** The plan says what the log does not show. */
+    @Test
+    void aPlanTellsHowALogIsWritten() throws IOException {
+        String text = Files.readString(log).replace("2026-03-14T", "03/04/2026 ");
+        Files.writeString(log, text);
+        assertThat(evaluate()).isEqualTo(3);
+        change(plan, "longest-gap: 10 s", "longest-gap: 10 s\nreading: {time-format: day-month-year}");
+        assertThat(evaluate()).isZero();
+        assertThat(out.toString()).contains("2026-04-03 08:05:00");
+    }
+
+    /** Two runs in one file: without a part they are named, with one the run is judged. */
+    @Test
+    void asksWhichOfSeveralCyclesIsMeant() throws IOException {
+        List<String> rows = Files.readAllLines(log);
+        List<String> two = new java.util.ArrayList<>(rows);
+        rows.stream().skip(1).map(r -> r.replace("2026-03-14T", "2026-03-15T")).forEach(two::add);
+        Files.write(log, two);
+        assertThat(evaluate()).isEqualTo(3);
+        assertThat(err.toString()).contains("The log holds 2 cycles: at temperature from 08:24:15 (line 233) to");
+        change(sheet, "equipment: R2", "equipment: R2\nlog-part: {from: 08:05, to: 10:05}");
+        assertThat(evaluate()).isZero();
+    }
+
+    @Test
+    void refusesTwoLogsOfOneName() throws IOException {
+        Path other = Files.createDirectory(folder.resolve("other")).resolve("R2-0314.csv");
+        Files.copy(log, other);
+        assertThat(run("evaluate", log.toString(), other.toString())).isEqualTo(64);
+        assertThat(err.toString()).contains("two logs would give the same record");
     }
 
     private int evaluate(String... more) {
