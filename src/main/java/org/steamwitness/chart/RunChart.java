@@ -138,7 +138,8 @@ public final class RunChart {
         NumberAxis axis = (NumberAxis) plot.getRangeAxis();
         evaluation.saturation().tolerance().ifPresent(tolerance -> {
             axis.setAutoRange(false);
-            double reach = 2.5 * Math.max(tolerance.airKelvin(), tolerance.superheatKelvin());
+            double reach =
+                    Math.max(2.5 * Math.max(tolerance.airKelvin(), tolerance.superheatKelvin()), 1.15 * worstInHold());
             axis.setRange(-reach, reach);
             plot.addRangeMarker(line(-tolerance.airKelvin()));
             plot.addRangeMarker(line(tolerance.superheatKelvin()));
@@ -271,5 +272,20 @@ public final class RunChart {
         public double at(int index) {
             return from.at(index) * factor + offset;
         }
+    }
+
+    /** The departure furthest from saturation in the hold phase, so that the picture shows it; zero if there is none. */
+    private double worstInHold() {
+        return evaluation
+                .phases()
+                .hold()
+                .map(phase -> evaluation.saturation().in(phase).stream()
+                        .flatMap(p -> p.figures().stream())
+                        .mapToDouble(f -> Math.max(
+                                Math.abs(f.lowest().kelvin()),
+                                Math.abs(f.highest().kelvin())))
+                        .max()
+                        .orElse(0))
+                .orElse(0.0);
     }
 }

@@ -111,8 +111,8 @@ final class TerminalPage {
         String air = part.smallestAirFraction().printed(a -> Printed.fixed(a * 100, 1) + " % by volume");
         wrapped(
                 "Saturation   ",
-                part.episodes().size() + " episodes in the hold phase, " + tolerance
-                        + "; smallest air these sensors could show: " + air);
+                part.episodes().size() + (part.episodes().size() == 1 ? " episode" : " episodes")
+                        + " in the hold phase, " + tolerance + "; smallest air these sensors could show: " + air);
     }
 
     private void lethality(LethalityPart part) {

@@ -203,12 +203,19 @@ public final class RecordAssembly {
                     finding.kind().word(),
                     finding.severity().word(),
                     finding.position().inFile()
-                            ? Given.of(finding.position().text())
+                            ? Given.of(place(finding.position()))
                             : Given.withheld("it concerns the run as a whole"),
                     facts,
                     finding.text(),
                     finding.remedy()));
         }
         return List.copyOf(parts);
+    }
+
+    /** The evaluation knows the log's lines, not its name. */
+    private String place(Position position) {
+        String name =
+                position.file().equals("log") ? evidence.provenance().log().name() : position.file();
+        return new Position(name, position.line(), position.column(), position.path()).text();
     }
 }
