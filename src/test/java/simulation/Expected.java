@@ -15,11 +15,13 @@ public enum Expected {
         this.exitCode = exitCode;
     }
 
-    String words() {
+    /** As records word it. */
+    public String words() {
         return words;
     }
 
-    int exitCode() {
+    /** As the shell gives it. */
+    public int exitCode() {
         return exitCode;
     }
 }

@@ -25,21 +25,24 @@ public final class History implements Watcher {
         }
     }
 
-    Moment at(double seconds) {
+    /** The plant at a second, or at the last whole second before it. */
+    public Moment at(double seconds) {
         int index = (int) Math.min(Math.max(Math.floor(seconds), 0), moments.size() - 1);
         return moments.get(index);
     }
 
-    double end() {
+    /** The last second. */
+    public double end() {
         return moments.get(moments.size() - 1).seconds();
     }
 
-    List<Moment> moments() {
+    /** Every second. */
+    public List<Moment> moments() {
         return moments;
     }
 
     /** First second from a time on at which something holds for a while; the end of the run if it never does. */
-    double first(double from, double staying, Predicate<Moment> holds) {
+    public double first(double from, double staying, Predicate<Moment> holds) {
         double since = Double.NaN;
         for (Moment moment : moments) {
             if (moment.seconds() < from) {

@@ -52,7 +52,7 @@ final class PorousRun {
         this.loadKg = jitter.about(24, 5);
         this.setPoint = jitter.about(135.2, 0.15);
         this.pocket = jitter.about(0.11, 0.02);
-        this.leakRate = on(PorousTwist.LEAKING) ? jitter.about(2.7e-3, 0.2e-3) : 0;
+        this.leakRate = on(PorousTwist.LEAKING) ? jitter.about(3.4e-3, 0.2e-3) : 0;
     }
 
     private boolean on(PorousTwist which) {

@@ -29,6 +29,7 @@ import simulation.plant.Window;
 final class RetortRun {
 
     private static final double HOLD_MINUTES = 30;
+    private static final int CLOCK_SLOW = 35;
     private static final double REFERENCE = 121.11;
 
     private final RetortTwist twist;
@@ -49,6 +50,8 @@ final class RetortRun {
     private final double faultAfter;
     private final double faultSeconds;
     private final double faultSize;
+    private final double pressureHigh;
+    private final double pressureDrift;
     private Rig rig;
 
     RetortRun(String name, RetortTwist twist, boolean faulty, LogStyle style, Jitter jitter) {
@@ -70,10 +73,16 @@ final class RetortRun {
         this.faultAfter = jitter.about(420, 180);
         this.faultSeconds = jitter.about(480, 120);
         this.faultSize = jitter.about(0.085, 0.02);
+        this.pressureHigh = on(RetortTwist.PRESSURE_HIGH) ? jitter.about(13_000, 1500) : 0;
+        this.pressureDrift = on(RetortTwist.PRESSURE_DRIFT) ? jitter.about(22_000, 2500) : 0;
     }
 
     private boolean is(RetortTwist which) {
         return twist == which;
+    }
+
+    private boolean dips() {
+        return on(RetortTwist.DIP_AND_FULL_HOLD) || on(RetortTwist.DIP_AND_SHORT_HOLD);
     }
 
     private boolean on(RetortTwist which) {
@@ -126,14 +135,14 @@ final class RetortRun {
                 .cooling(jitter.about(17, 2))
                 .loss(loss)
                 .condensate(15, 0);
-        if (on(RetortTwist.SUPERHEAT)) {
+        if (on(RetortTwist.SUPERHEAT) || dips()) {
             equipment.byPressure();
         }
         if (on(RetortTwist.AIR_COMING_IN)) {
             equipment.leakingAirValve(jitter.about(0.00040, 0.00005), new Window("hold", 120, 5000));
         }
         double room = jitter.about(23, 3);
-        Body metal = new Body(on(RetortTwist.CUT) ? 85 : room, 8000, 800, new double[] {metalKg * 500});
+        Body metal = new Body(on(RetortTwist.CUT) ? 85 : room, 8000, dips() ? 100 : 800, new double[] {metalKg * 500});
         double heat = loadKg * 3550;
         Body near = can(0.5 * heat, 1.0);
         Body far = can(0.5 * heat, jitter.about(1.12, 0.05));
@@ -168,7 +177,7 @@ final class RetortRun {
                     new Probe(free, lag(4), high + jitter.about(0.02, 0.05), 0.03, freeSpaceFaults()),
                     step());
         }
-        rig.pressure("P1", new Transducer(jitter.about(0, 300), 0, 90));
+        rig.pressure("P1", new Transducer(pressureHigh + jitter.about(0, 300), pressureDrift, 90));
         List<ProbeFault> slipped = on(RetortTwist.SLIPPED_PROBE)
                 ? List.of(new ProbeFault(ProbeFault.Kind.SLIPPED, new Window("hold", 60, 9000)))
                 : List.of();
@@ -267,12 +276,12 @@ final class RetortRun {
     private void holds(List<Step> steps, Settings steam) {
         double seconds = HOLD_MINUTES * 60 + jitter.about(110, 40);
         Settings held = is(RetortTwist.RIPPLE) ? rippling(steam) : steam;
-        if (on(RetortTwist.DIP_AND_FULL_HOLD) || on(RetortTwist.DIP_AND_SHORT_HOLD)) {
+        if (dips()) {
             double before = jitter.about(600, 200);
             steps.add(Step.of("hold", before, held));
-            Settings weak = Settings.shut().steamTo(117.8, 0.06).bleeder(1);
+            Settings weak = Settings.shut().steamTo(117.8, 0.15).bleeder(3);
             steps.add(Step.of("steam failure", jitter.about(170, 40), weak));
-            steps.add(toTemperature("heating again", steam.steamTo(setPoint, 0.2)));
+            steps.add(toTemperature("heating again", steam.steamTo(setPoint, 0.12)));
             double again = on(RetortTwist.DIP_AND_FULL_HOLD) ? seconds : seconds - before;
             steps.add(Step.of("second hold", again, held));
         } else if (on(RetortTwist.CREEP)) {
@@ -406,13 +415,22 @@ final class RetortRun {
             case SUPERHEAT -> List.of(new Fault("superheat", "all", from, to, superheat(from, to), "K at its most"));
             case DIP_AND_FULL_HOLD, DIP_AND_SHORT_HOLD ->
                 List.of(new Fault(
-                        "steam-failure", "all", rig.start("steam failure"), rig.start("heating again"), 118, "degC"));
+                        "steam-failure",
+                        "all",
+                        rig.start("steam failure"),
+                        rig.start("heating again"),
+                        rig.history().at(rig.start("heating again")).gas().celsius(),
+                        "degC"));
             case CREEP -> List.of(new Fault("creep", "all", hold, off, 0.05, "K/min"));
             case CUT -> List.of(new Fault("cut-log", "all", 0, off, 0, "s"));
             case DRAIN_DIPS ->
                 List.of(new Fault("drain-dips", "drain", from, Math.min(from + 900, off), 0.16, "share of air"));
             case HIGH_PROBE ->
                 List.of(new Fault("offset", "free-space", 0, rig.history().end(), 3.2, "K"));
+            case PRESSURE_HIGH ->
+                List.of(new Fault("pressure-error", "all", 0, rig.history().end(), pressureHigh, "Pa"));
+            case PRESSURE_DRIFT ->
+                List.of(new Fault("pressure-drift", "all", 0, rig.history().end(), pressureDrift, "Pa/h"));
             case DEAD_PROBE ->
                 List.of(new Fault("open-circuit", "free-space", 0, rig.history().end(), 0, ""));
             case FROZEN_PROBE ->
@@ -504,6 +522,9 @@ final class RetortRun {
 
     private String sheet(LocalDateTime first) {
         SheetText sheet = new SheetText(name, planId(), "R2", first, style);
+        if (is(RetortTwist.QUIRKS)) {
+            sheet.loggerSlow(CLOCK_SLOW);
+        }
         sheet.add("atmosphere: " + Names.number(atmosphere / 100, 0) + " hPa");
         sheet.add("product: {name: bean stew, code: BS-73, lots: [L2291], container: 73 x 111 mm, count: 1240}");
         sheet.add("initial-temperature: {value: " + Names.number(initial, 1) + " degC, at: " + sheet.at(0)

@@ -35,6 +35,10 @@ enum RetortTwist {
     RIPPLE,
     /** The pressure falls below the atmosphere at the start of cooling. */
     COOLING_DIP,
+    /** The transducer reads high by the same kilopascals. */
+    PRESSURE_HIGH,
+    /** The transducer drifts upwards. */
+    PRESSURE_DRIFT,
     /** The free-space probe reads high. */
     HIGH_PROBE,
     /** Only the chamber's own probe is there. */

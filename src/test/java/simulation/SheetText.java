@@ -14,6 +14,7 @@ final class SheetText {
 
     private final LocalDateTime start;
     private final List<String> lines = new ArrayList<>();
+    private int behind;
 
     /** Begins a sheet for a log whose first row was written at a time of the logger's clock. */
     SheetText(String run, String plan, String equipment, LocalDateTime start, LogStyle style) {
@@ -29,6 +30,13 @@ final class SheetText {
         }
     }
 
+    /** The logger's clock is behind the clock on the wall, by which people write. */
+    SheetText loggerSlow(int seconds) {
+        lines.add("clocks: {log: " + CLOCK.format(start) + ", wall: " + CLOCK.format(start.plusSeconds(seconds)) + "}");
+        behind = seconds;
+        return this;
+    }
+
     SheetText add(String line) {
         lines.add(line);
         return this;
@@ -36,7 +44,7 @@ final class SheetText {
 
     /** Time of the wall clock so many seconds after the first row. */
     String at(double seconds) {
-        return CLOCK.format(start.plusSeconds(Math.round(seconds)));
+        return CLOCK.format(start.plusSeconds(Math.round(seconds) + behind));
     }
 
     SheetText entered(double seconds) {

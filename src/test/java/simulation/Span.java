@@ -9,7 +9,8 @@ package simulation;
  */
 public record Span(String name, double from, double to) {
 
-    double length() {
+    /** How long it lasts. */
+    public double length() {
         return to - from;
     }
 }

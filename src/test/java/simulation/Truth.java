@@ -49,12 +49,12 @@ public record Truth(
         Balance balance) {
 
     /** The longest stretch in the band of the hold phase; 0 if there was none. */
-    double longestHold() {
+    public double longestHold() {
         return attempts.stream().mapToDouble(Span::length).max().orElse(0);
     }
 
     /** What a flow came to over a phase. */
-    double over(Span phase, Flow flow) {
+    public double over(Span phase, Flow flow) {
         return to(phase).of(flow) - history.at(phase.from()).ledger().of(flow);
     }
 
@@ -62,7 +62,8 @@ public record Truth(
         return history.at(phase.to()).ledger();
     }
 
-    String json() {
+    /** All of it but the seconds, as text. */
+    public String json() {
         Map<String, Object> all = new LinkedHashMap<>();
         all.put("run", run);
         all.put("variant", variant);
@@ -139,7 +140,7 @@ public record Truth(
     }
 
     /** Energies of a phase in joule, masses in kilogram. */
-    Map<String, Double> energy(Span phase) {
+    public Map<String, Double> energy(Span phase) {
         Moment first = history.at(phase.from());
         Moment last = history.at(phase.to());
         Map<String, Double> map = new LinkedHashMap<>();
