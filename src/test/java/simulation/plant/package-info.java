@@ -1,0 +1,2 @@
+/** A steam chamber and what is piped to it: balances of mass and energy, stepped through time. */
+package simulation.plant;
