@@ -105,6 +105,10 @@ final class TerminalPage {
 
     private void saturation() {
         SaturationPart part = record.saturation();
+        if (part.tolerance().value().isEmpty()) {
+            wrapped("Saturation   ", part.tolerance().printed(t -> ""));
+            return;
+        }
         String tolerance = part.tolerance()
                 .printed(t -> "tolerance -" + Printed.fixed(t.airKelvin(), 1) + " K to +"
                         + Printed.fixed(t.superheatKelvin(), 1) + " K");

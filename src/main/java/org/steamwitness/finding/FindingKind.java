@@ -170,6 +170,11 @@ public enum FindingKind {
             Severity.REVIEW,
             "The log tells the time since its start alone, so that the entered marks can't be placed.",
             "Enter under clocks what the log and a clock on the wall showed at one moment."),
+    /** The log's distance from UTC is not that of the zone. */
+    ZONE_DIFFERS(
+            Severity.REVIEW,
+            "The log tells a distance of {log} from UTC, the zone {zone} has {expected} on that day.",
+            "Check the zone of the run sheet; entered times were taken by the log's own clock."),
     /** The clock of the log differs from the one that entries are made by. */
     CLOCK_SET(
             Severity.NOTE,

@@ -10,9 +10,9 @@ final class ChannelName {
 
     private ChannelName() {}
 
-    /** Lower case with hyphens, without a unit in brackets, different from all names that are taken. */
+    /** Lower case with hyphens, without a unit in brackets or behind "in", different from all names that are taken. */
     static String of(String header, Set<String> taken) {
-        String bare = header.replaceAll("[(\\[{][^)\\]}]*[)\\]}]", " ");
+        String bare = header.replaceAll("[(\\[{][^)\\]}]*[)\\]}]", " ").replaceFirst("(?<=\\S)\\s+in\\s+\\S+.*$", "");
         String name = bare.toLowerCase(Locale.ROOT)
                 .replaceAll("[^\\p{L}\\p{Nd}]+", "-")
                 .replaceAll("^-|-$", "");

@@ -67,7 +67,7 @@ final class DraftChannels {
     private void write(String name, String place, FoundColumn column) {
         names.add(name);
         if (columns.contains(column)) {
-            lines.add("  # column " + (columns.indexOf(column) + 1) + ": " + QuotedText.comment(column.header()));
+            lines.add("  # column " + QuotedText.comment(column.header()));
         }
         StringBuilder entry = new StringBuilder("  - {name: " + QuotedText.of(name) + ", column: "
                 + QuotedText.of(column.header()) + ", quantity: "

@@ -92,14 +92,15 @@ public final class Evaluate {
             return new Outcome.Refused(unreadable.findings());
         }
         if (intake instanceof Intake.Read read) {
-            return placed(plan, sheet, inZone(read.trace(), zone), read);
+            return placed(plan, sheet, inZone(read.trace(), zone), read, zone);
         }
         return new Outcome.Cancelled();
     }
 
     /** Takes the part of the log that is this run, and sets its clock by the wall's. */
-    private Outcome placed(Plan plan, RunSheet sheet, Trace whole, Intake.Read read) {
+    private Outcome placed(Plan plan, RunSheet sheet, Trace whole, Intake.Read read, Optional<ZoneId> zone) {
         List<Finding> known = new ArrayList<>(read.findings());
+        zone.flatMap(z -> RunPlace.zoneDiffers(read.trace(), z)).ifPresent(known::add);
         Trace trace = whole;
         if (sheet.logPart().isPresent()) {
             Optional<Trace> part = RunPlace.part(whole, sheet.logPart().get());

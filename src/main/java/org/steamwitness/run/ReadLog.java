@@ -103,6 +103,12 @@ public final class ReadLog {
 
     private static LogSurvey survey(Intake.Read read) {
         List<ColumnSurvey> columns = new ArrayList<>();
+        boolean onePressure = read.columns().stream()
+                        .filter(c -> c.quantity()
+                                .filter(q -> q == QuantityKind.PRESSURE)
+                                .isPresent())
+                        .count()
+                == 1;
         List<org.steamwitness.plan.FoundColumn> forPlan = new ArrayList<>();
         for (FoundColumn column : read.columns()) {
             Optional<Channel> channel = read.trace().channels().stream()
@@ -113,7 +119,7 @@ public final class ReadLog {
             if (channel.isPresent()
                     && (column.quantity().isPresent() || column.unit().isPresent())) {
                 forPlan.add(new org.steamwitness.plan.FoundColumn(
-                        column.header(), column.quantity(), column.unit(), datum, column.place()));
+                        column.header(), column.quantity(), column.unit(), datum, place(column, onePressure)));
             }
         }
         return new LogSurvey(
@@ -128,6 +134,13 @@ public final class ReadLog {
                         .toList(),
                 read.findings(),
                 forPlan);
+    }
+
+    /** The only pressure of a log is the chamber's, unless its header says otherwise. */
+    private static Optional<Place> place(FoundColumn column, boolean onePressure) {
+        boolean pressure =
+                column.quantity().filter(q -> q == QuantityKind.PRESSURE).isPresent();
+        return column.place().isEmpty() && pressure && onePressure ? Optional.of(Place.CHAMBER) : column.place();
     }
 
     private static LogSurvey.Extent extent(Trace trace) {

@@ -1,6 +1,8 @@
 package org.steamwitness.run;
 
 import java.time.LocalTime;
+import java.time.ZoneId;
+import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -63,6 +65,18 @@ final class RunPlace {
                 FindingKind.CLOCK_SET,
                 Position.RUN,
                 Map.of("log", clocks.log().toString(), "wall", clocks.wall().toString()));
+    }
+
+    /** The log's own distance from UTC against that of the zone; empty if it tells none or both agree. */
+    static Optional<Finding> zoneDiffers(Trace trace, ZoneId zone) {
+        LogClock clock = trace.clock();
+        ZoneOffset expected = zone.getRules().getOffset(clock.first());
+        return clock.offset()
+                .filter(own -> clock.date().isPresent() && !own.equals(expected))
+                .map(own -> new Finding(
+                        FindingKind.ZONE_DIFFERS,
+                        Position.RUN,
+                        Map.of("log", own.getId(), "zone", zone.getId(), "expected", expected.getId())));
     }
 
     static Finding several(Trace trace, List<Stretch> cycles) {

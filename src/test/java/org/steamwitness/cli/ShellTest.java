@@ -317,6 +317,25 @@ class ShellTest {
     }
 
     @Test
+    void tellsAZoneThatTheLogContradicts() throws IOException {
+        Files.write(
+                log,
+                Files.readAllLines(log).stream()
+                        .map(row -> row.replaceFirst("^(2026-[^,]*),", "$1+02:00,"))
+                        .toList());
+        assertThat(evaluate()).isZero();
+        assertThat(out.toString().replaceAll("\\s+", " "))
+                .contains("The log tells a distance of +02:00 from UTC, the zone Europe/Lisbon has Z on that day.");
+    }
+
+    @Test
+    void saysOfMediaThatHoldAirThatSaturationIsNotJudged() throws IOException {
+        change(plan, "medium: saturated-steam", "medium: steam-air");
+        evaluate();
+        assertThat(out.toString()).contains("Saturation   ").doesNotContain("smallest air");
+    }
+
+    @Test
     void refusesTwoLogsOfOneName() throws IOException {
         Path other = Files.createDirectory(folder.resolve("other")).resolve("R2-0314.csv");
         Files.copy(log, other);
