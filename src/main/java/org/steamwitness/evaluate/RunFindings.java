@@ -76,12 +76,8 @@ final class RunFindings {
         int last = trace.lineOf(hold.end() - 1);
         reading.refused().stream()
                 .filter(range -> range.toLine() > first && range.fromLine() < last)
-                .forEach(range -> find(
-                        FindingKind.ROWS_REFUSED_IN_HOLD,
-                        range.fromLine(),
-                        Map.of(
-                                "from", Integer.toString(range.fromLine()),
-                                "to", Integer.toString(range.toLine()))));
+                .forEach(range ->
+                        find(FindingKind.ROWS_REFUSED_IN_HOLD, range.fromLine(), Map.of("lines", range.lines())));
     }
 
     private void attempts(Phases phases, HoldAttempt judged) {

@@ -106,12 +106,12 @@ public enum FindingKind {
     /** Rows that did not become samples. */
     ROWS_REFUSED(
             Severity.REVIEW,
-            "{rows} rows between lines {from} and {to} were refused: {column}: {reason}.",
+            "{lines} refused: {column}: {reason}.",
             "Look at these lines of the log; missing samples are never filled in."),
     /** Rows or fields refused while the hold was running. */
     ROWS_REFUSED_IN_HOLD(
             Severity.BLOCKS,
-            "Rows or fields between lines {from} and {to}, in the hold phase, were refused.",
+            "{lines}, in the hold phase, refused in whole or in part.",
             "A person has to look at these lines and judge whether the hold phase is proven without them."),
     /** Missing samples while the hold was running. */
     SAMPLES_MISSING_IN_HOLD(

@@ -240,9 +240,7 @@ final class LogIntake {
                                     FindingKind.ROWS_REFUSED,
                                     Position.ofLine(file, range.fromLine()),
                                     Map.of(
-                                            "rows", Integer.toString(range.rows()),
-                                            "from", Integer.toString(range.fromLine()),
-                                            "to", Integer.toString(range.toLine()),
+                                            "lines", range.lines(),
                                             "column", range.column(),
                                             "reason", range.reason())));
         }

@@ -63,23 +63,14 @@ public record Reading(
     public record RefusedRows(int fromLine, int toLine, int rows, String column, String reason) {
 
         /**
-         * Joins the next row when it is refused for the same reason.
+         * Which lines these are, in words.
          *
-         * @param next a later refusal
-         * @return whether both are one range
+         * @return such as "Line 14", or "Lines 776 to 778 (3 rows)"
          */
-        public boolean continuedBy(RefusedRows next) {
-            return next.fromLine == toLine + 1 && next.column.equals(column) && next.reason.equals(reason);
-        }
-
-        /**
-         * One range from both.
-         *
-         * @param next a refusal for which {@link #continuedBy} holds
-         * @return the joined range
-         */
-        public RefusedRows joinedWith(RefusedRows next) {
-            return new RefusedRows(fromLine, next.toLine, rows + next.rows, column, reason);
+        public String lines() {
+            return fromLine == toLine
+                    ? "Line " + fromLine
+                    : "Lines " + fromLine + " to " + toLine + " (" + rows + (rows == 1 ? " row)" : " rows)");
         }
     }
 }

@@ -2,11 +2,19 @@ package org.steamwitness.trace;
 
 /**
  * How fast a column changes at a sample: the straight line by least squares through the sample and up to three present
- * neighbours on each side. Over evenly spaced samples that is the slope of a local quadratic at its centre.
+ * neighbours on each side. Over evenly spaced samples that is the slope of a local quadratic at its centre. Where the
+ * column bends sharply, as when steam is shut off, a line across the bend belongs to neither side: then the line through
+ * the neighbours of the smoother side is taken.
  */
 public final class Slope {
 
     private static final int REACH = 3;
+
+    /** A line that scatters so many times more than one to a side crosses a bend; common practice, no source. */
+    private static final double BEND = 4;
+
+    /** Less scatter than this, in kelvin or pascal, is no bend. */
+    private static final double SMALLEST_BEND = 0.2;
 
     private final Column seconds;
     private final Column values;
@@ -47,10 +55,22 @@ public final class Slope {
 
     private Line around(int index) {
         if (values.missing(index)) {
-            return new Line(Double.NaN, 0);
+            return new Line(Double.NaN, 0, 0);
         }
         int first = reach(index, -1);
         int last = reach(index, 1);
+        Line across = line(index, first, last);
+        if (index - first < REACH || last - index < REACH) {
+            return across;
+        }
+        Line before = line(index, first, index);
+        Line after = line(index, index, last);
+        Line smoother = before.scatter <= after.scatter ? before : after;
+        return across.scatter > BEND * smoother.scatter + SMALLEST_BEND ? smoother : across;
+    }
+
+    /** The line by least squares through the present samples of a stretch around a sample. */
+    private Line line(int index, int first, int last) {
         double meanTime = 0;
         double meanValue = 0;
         int count = 0;
@@ -63,14 +83,21 @@ public final class Slope {
         }
         double squares = 0;
         double products = 0;
+        double spread = 0;
         for (int i = first; i <= last; i++) {
             if (!values.missing(i)) {
                 double time = seconds.at(i) - seconds.at(index) - meanTime;
+                double value = values.at(i) - values.at(index) - meanValue;
                 squares += time * time;
-                products += time * (values.at(i) - values.at(index) - meanValue);
+                products += time * value;
+                spread += value * value;
             }
         }
-        return new Line(count > 1 ? products / squares : Double.NaN, squares);
+        if (count < 2) {
+            return new Line(Double.NaN, squares, 0);
+        }
+        double residual = Math.max(0, spread - products * products / squares);
+        return new Line(products / squares, squares, count > 2 ? Math.sqrt(residual / (count - 2)) : 0);
     }
 
     /** The furthest sample to one side that the line may use. */
@@ -89,5 +116,5 @@ public final class Slope {
         return furthest;
     }
 
-    private record Line(double slope, double squares) {}
+    private record Line(double slope, double squares, double scatter) {}
 }

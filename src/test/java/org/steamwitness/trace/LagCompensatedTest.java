@@ -65,4 +65,22 @@ class LagCompensatedTest {
         Column column = Column.of(values);
         return new LagCompensated(column, new Slope(Column.of(seconds), column, 10), lagSeconds);
     }
+
+    /** A plateau that ends in a fall of 2 K a second: up to the last sample of the plateau nothing is added. */
+    @Test
+    void aBendIsNotSmearedOverThePlateauBeforeIt() {
+        double[] times = new double[20];
+        double[] values = new double[20];
+        for (int i = 0; i < 20; i++) {
+            times[i] = i * 5;
+            values[i] = i <= 10 ? 395 : 395 - 10 * (i - 10);
+        }
+        Column seconds = Column.of(times);
+        Column read = Column.of(values);
+        LagCompensated actual = new LagCompensated(read, new Slope(seconds, read, 10), 6);
+        for (int i = 3; i <= 10; i++) {
+            assertThat(actual.at(i)).isCloseTo(395, within(1e-9));
+        }
+        assertThat(actual.at(14)).isCloseTo(355 - 12, within(1e-9));
+    }
 }
