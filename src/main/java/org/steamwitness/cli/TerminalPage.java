@@ -122,12 +122,14 @@ final class TerminalPage {
     private void lethality(LethalityPart part) {
         String minimum = part.minimum()
                 .value()
-                .map(m -> ", minimum " + Printed.fixed(m, 2) + " " + part.unit())
+                .map(m -> ", minimum " + Printed.fixed(m, part.unit().equals("s") ? 0 : 2) + " " + part.unit())
                 .orElse("");
-        lines.add(padded("Least " + part.name(), 13)
+        int decimals = part.unit().equals("s") ? 0 : 2;
+        String governs = part.governs().equals("least") ? "Least " : "Most ";
+        lines.add(padded(governs + part.name(), 13)
                 + part.governing()
-                        .printed(g -> Printed.fixed(g.value(), 2) + " " + part.unit() + " at " + g.channel() + " ("
-                                + part.counted() + minimum + ")"));
+                        .printed(g -> Printed.fixed(g.value(), decimals) + " " + part.unit() + " at " + g.channel()
+                                + " (" + part.counted() + minimum + ")"));
     }
 
     private void findings() {
@@ -165,7 +167,10 @@ final class TerminalPage {
     }
 
     private static String plain(double value, String unit) {
-        return unit.equals("s") ? Printed.duration(value) : Printed.fixed(value, 2) + " " + unit;
+        if (unit.equals("s")) {
+            return Printed.duration(value);
+        }
+        return Printed.fixed(value, unit.startsWith("s ") ? 0 : 2) + " " + unit;
     }
 
     private static String signed(double value, String unit) {

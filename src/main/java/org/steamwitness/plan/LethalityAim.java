@@ -72,6 +72,15 @@ public record LethalityAim(
         }
 
         /**
+         * Tells whether the plan sets a maximum and no minimum.
+         *
+         * @return true if the probe that reached most governs
+         */
+        public boolean maximumAlone() {
+            return mostSeconds.isPresent() && leastSeconds.isEmpty();
+        }
+
+        /**
          * A minimum alone.
          *
          * @param leastSeconds every probe has to reach it

@@ -15,7 +15,7 @@ import java.util.List;
  * @param counted what counts towards them
  * @param probes which channels the plan wants it of
  * @param perChannel one entry a probe
- * @param governing the probe that reached least
+ * @param governing the probe that reached least, or most where the plan sets a maximum alone
  * @param decimalReduction what the governing probe's lethality reduces, and how far
  */
 public record LethalityPart(
@@ -31,6 +31,15 @@ public record LethalityPart(
         List<PerChannel> perChannel,
         Given<Governing> governing,
         Given<Reduction> decimalReduction) {
+
+    /**
+     * Which probe governs, in a word.
+     *
+     * @return "least" or "greatest"
+     */
+    public String governs() {
+        return maximum.value().isPresent() && minimum.value().isEmpty() ? "greatest" : "least";
+    }
 
     /**
      * What one probe reached.
@@ -76,7 +85,7 @@ public record LethalityPart(
     public record Interval(double low, double high) {}
 
     /**
-     * The probe that reached least.
+     * The probe that governs.
      *
      * @param channel the probe
      * @param value what counts towards the limits

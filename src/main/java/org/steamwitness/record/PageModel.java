@@ -241,6 +241,7 @@ final class PageModel {
                                     .value()
                                     .map(m -> "; maximum " + limit(part.maximum(), part.unit()))
                                     .orElse(""));
+            map.put("governs", part.governs());
             map.put(
                     "least",
                     part.governing()
@@ -356,7 +357,10 @@ final class PageModel {
     }
 
     private static String plain(double value, String unit) {
-        return unit.equals("s") ? Printed.duration(value) : Printed.fixed(value, 2) + " " + unit;
+        if (unit.equals("s")) {
+            return Printed.duration(value);
+        }
+        return Printed.fixed(value, unit.startsWith("s ") ? 0 : 2) + " " + unit;
     }
 
     private static String signed(double value, String unit) {

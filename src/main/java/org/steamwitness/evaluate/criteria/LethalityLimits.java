@@ -39,7 +39,7 @@ final class LethalityLimits {
     }
 
     private Criterion least(double limitSeconds) {
-        Optional<ProbeLethality> probe = lethality.governing();
+        Optional<ProbeLethality> probe = lethality.least();
         Optional<Decision> decision = probe.map(p -> unlessLost(
                 p,
                 GuardBand.atLeast(

@@ -51,11 +51,21 @@ public record Lethality(LethalityAim aim, List<ProbeLethality> probes) {
     }
 
     /**
-     * The probe that reached least, which governs a minimum.
+     * The probe that governs: the one that reached most where the plan sets a maximum alone, else the one that reached
+     * least.
      *
      * @return empty if there is no probe
      */
     public Optional<ProbeLethality> governing() {
+        return aim.limits().maximumAlone() ? greatest() : least();
+    }
+
+    /**
+     * The probe that reached least, which governs a minimum.
+     *
+     * @return empty if there is no probe
+     */
+    public Optional<ProbeLethality> least() {
         return probes.stream().min(Comparator.comparingDouble(p -> p.countedSeconds(aim)));
     }
 

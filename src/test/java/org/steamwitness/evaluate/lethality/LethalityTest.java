@@ -115,6 +115,23 @@ class LethalityTest {
                 true,
                 Optional.empty());
         assertThat(washed(aim, 133, 60).probes().get(0).countedSeconds(aim)).isCloseTo(600, within(1e-6));
+        Bench bench = Bench.every(5, 3)
+                .with(
+                        Bench.temperature("hotter", Place.WATER, 0.1, 121, 121, 121),
+                        Bench.temperature("washer", Place.WATER, 0.1, 120, 120, 120));
+        LethalityAim both = new LethalityAim(
+                "C100",
+                100 + 273.15,
+                33,
+                OptionalDouble.empty(),
+                LethalityUnit.MINUTE,
+                aim.limits(),
+                new ProbeChoice(Optional.empty(), List.of("washer", "hotter")),
+                true,
+                Optional.empty());
+        Lethality most = result(bench.aiming(both));
+        assertThat(most.governing().orElseThrow().channel().name()).isEqualTo("hotter");
+        assertThat(most.least().orElseThrow().channel().name()).isEqualTo("washer");
     }
 
     /** Twelve decimal reductions of a spore with D 0.21 min take 2.52 min: the published 12 D cook of canned foods. */
