@@ -155,6 +155,9 @@ final class Binding {
         }
         OptionalDouble seconds = trace.clock().secondsAt(entered.get(), trace.lastSeconds());
         if (seconds.isEmpty()) {
+            if (plan.requiredEntries().contains("marks." + name)) {
+                find(FindingKind.ENTRY_MISSING, Map.of("entry", "marks." + name + " within the log"));
+            }
             find(
                     FindingKind.MARK_OUTSIDE_LOG,
                     Map.of(

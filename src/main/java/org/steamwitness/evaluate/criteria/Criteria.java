@@ -28,7 +28,7 @@ public final class Criteria {
         List<Criterion> criteria = new ArrayList<>();
         criteria.add(HoldingTime.of(plan, hold));
         SaturationAgreement.of(saturation, phases, plan.longestGapSeconds()).ifPresent(criteria::add);
-        lethality.stream().map(LethalityLimits::of).forEach(criteria::addAll);
+        lethality.stream().map(l -> LethalityLimits.of(l, hold.cutByLog())).forEach(criteria::addAll);
         criteria.addAll(UnjudgedLimits.of(plan.limits()));
         if (plan.unheeded().isEmpty()) {
             return List.copyOf(criteria);

@@ -41,7 +41,7 @@ final class HoldingTime {
         }
         String proven = Printed.duration(hold.provenSeconds()) + required + " proven";
         if (decision == Decision.UNDECIDED && hold.cutByLog()) {
-            return proven + "; a gap or the end of the log leaves open whether it was held longer";
+            return proven + "; a gap or an end of the log leaves open whether it was held longer";
         }
         return decision == Decision.UNDECIDED
                 ? proven + ", " + Printed.duration(hold.possibleSeconds())

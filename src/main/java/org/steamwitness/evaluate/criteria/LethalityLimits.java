@@ -24,14 +24,16 @@ final class LethalityLimits {
 
     private final Lethality lethality;
     private final LethalityAim aim;
+    private final boolean cutByLog;
 
-    private LethalityLimits(Lethality lethality) {
+    private LethalityLimits(Lethality lethality, boolean cutByLog) {
         this.lethality = lethality;
+        this.cutByLog = cutByLog;
         this.aim = lethality.aim();
     }
 
-    static List<Criterion> of(Lethality lethality) {
-        LethalityLimits limits = new LethalityLimits(lethality);
+    static List<Criterion> of(Lethality lethality, boolean cutByLog) {
+        LethalityLimits limits = new LethalityLimits(lethality, cutByLog);
         List<Criterion> criteria = new ArrayList<>();
         limits.aim.limits().leastSeconds().ifPresent(least -> criteria.add(limits.least(least)));
         limits.aim.limits().mostSeconds().ifPresent(most -> criteria.add(limits.most(most)));
@@ -52,9 +54,11 @@ final class LethalityLimits {
         return criterion("lethality-" + aim.name(), "least", probe, limitSeconds, true, decision);
     }
 
-    /** Time without samples counts as nothing, so that a lethality that falls short only for it is not known to. */
-    private static Decision unlessLost(ProbeLethality probe, Decision decision) {
-        return decision == Decision.NOT_MET && probe.coverage().lostSeconds() > 0 ? Decision.UNDECIDED : decision;
+    /** Time without samples counts as nothing, so that a lethality that falls short for it, or cut, is not known to. */
+    private Decision unlessLost(ProbeLethality probe, Decision decision) {
+        return decision == Decision.NOT_MET && (cutByLog || probe.coverage().lostSeconds() > 0)
+                ? Decision.UNDECIDED
+                : decision;
     }
 
     private Criterion most(double limitSeconds) {

@@ -18,7 +18,7 @@ import org.steamwitness.trace.Trace;
  *
  * @param provenSeconds from the first to the last sample inside the band; zero if it was never held
  * @param possibleSeconds from the sample before to the sample after; the truth lies between both
- * @param cutByLog whether a gap or the end of the log leaves open how long it was really held
+ * @param cutByLog whether a gap or an end of the log leaves open how long it was really held
  * @param probes what each temperature channel showed, in the order of the plan
  * @param spread greatest difference between steam-contact probes at one instant; empty with fewer than two of them
  * @param missingSamples samples of the starting channels that are missing in the hold phase
@@ -54,7 +54,9 @@ public record HoldResult(
         return new HoldResult(
                 trace.seconds().at(attempt.to()) - trace.seconds().at(attempt.from()),
                 attempt.latestEndSeconds() - attempt.earliestStartSeconds(),
-                phases.attempts().stream().anyMatch(a -> a.endedBy() == EndedBy.GAP || a.endedBy() == EndedBy.LOG_END),
+                attempt.from() == 0
+                        || phases.attempts().stream()
+                                .anyMatch(a -> a.endedBy() == EndedBy.GAP || a.endedBy() == EndedBy.LOG_END),
                 probes,
                 Spread.greatest(plan.inSteam().stream().map(instruments::of).toList(), hold),
                 missing(plan, hold));

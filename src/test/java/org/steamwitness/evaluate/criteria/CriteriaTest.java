@@ -175,7 +175,7 @@ class CriteriaTest {
         double[] reference = new double[61];
         Arrays.fill(reference, 121.11);
         double[] chamber = new double[61];
-        Arrays.fill(chamber, 122);
+        Arrays.fill(chamber, 1, 60, 122);
         Evaluation evaluation = evaluate(Bench.every(5, 61)
                 .with(
                         Bench.temperature("chamber", Place.REFERENCE, 0.05, chamber),
@@ -299,6 +299,28 @@ class CriteriaTest {
         assertThat(evaluation.findings()).extracting(Finding::kind).contains(FindingKind.PROBE_WITHOUT_SAMPLES);
     }
 
+    /** What lies before the first sample and behind the last is not known, so neither time nor lethality is too small. */
+    @Test
+    void aLogThatBeginsOrEndsInTheHoldLeavesOpenWhatItLacks() {
+        double[] begun = held(40);
+        Arrays.fill(begun, 20, 40, 60);
+        double[] ended = held(40);
+        Arrays.fill(ended, 0, 20, 60);
+        double[] can = new double[40];
+        Arrays.fill(can, 118);
+        Evaluation early = evaluate(
+                Bench.every(5, 40).holding(600).with(Bench.temperature("chamber", Place.REFERENCE, 0.1, begun)));
+        assertThat(early.criteria().get(0).decision()).isEqualTo(Decision.UNDECIDED);
+        Evaluation late = evaluate(Bench.every(5, 40)
+                .holding(600)
+                .with(
+                        Bench.temperature("chamber", Place.REFERENCE, 0.1, ended),
+                        Bench.temperature("can-1", Place.PRODUCT, 0.1, can))
+                .aiming(Bench.aim(121.11, 600, true)));
+        assertThat(late.criteria().get(0).decision()).isEqualTo(Decision.UNDECIDED);
+        assertThat(late.criteria().get(2).decision()).isEqualTo(Decision.UNDECIDED);
+    }
+
     @Test
     void aHoldCutShortByTheEndOfTheLogIsUndecided() {
         Criterion time = evaluate(Bench.every(5, 20)
@@ -309,7 +331,7 @@ class CriteriaTest {
         assertThat(time.decision()).isEqualTo(Decision.UNDECIDED);
         assertThat(time.why())
                 .isEqualTo(
-                        "1 min 35 s of 10 min 00 s proven; a gap or the end of the log leaves open whether it was held"
+                        "1 min 35 s of 10 min 00 s proven; a gap or an end of the log leaves open whether it was held"
                                 + " longer");
     }
 
